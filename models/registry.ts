@@ -1,0 +1,202 @@
+import { type Sequelize } from 'sequelize';
+import { Answer, initAnswer } from './answer';
+import { AnswerCheck, initAnswerCheck } from './answer-check';
+import { ApiToken, initApiToken } from './api-token';
+import { Appeal, initAppeal } from './appeal';
+import { initAuditEvent } from './audit-event';
+import { CommentSnippet, initCommentSnippet } from './comment-snippet';
+import { ConflictOfInterest, initConflictOfInterest } from './conflict-of-interest';
+import { Course, initCourse } from './course';
+import { CreditEntry, initCreditEntry } from './credit-entry';
+import { CreditRule, initCreditRule } from './credit-rule';
+import { Delivery, initDelivery } from './delivery';
+import { Department, initDepartment } from './department';
+import { Draw, initDraw } from './draw';
+import { Extension, initExtension } from './extension';
+import { Intake, initIntake } from './intake';
+import { IntakeRow, initIntakeRow } from './intake-row';
+import { LinkToken, initLinkToken } from './link-token';
+import { Membership, initMembership } from './membership';
+import { ProblemSet, initProblemSet } from './problem-set';
+import { ProblemSetItem, initProblemSetItem } from './problem-set-item';
+import { QueueItem, initQueueItem } from './queue-item';
+import { Ruling, initRuling } from './ruling';
+import { RulingReversal, initRulingReversal } from './ruling-reversal';
+import { SavedAnswer, initSavedAnswer } from './saved-answer';
+import { ScoreReport, initScoreReport } from './score-report';
+import { SecondMarking, initSecondMarking } from './second-marking';
+import { Section, initSection } from './section';
+import { SectionGrader, initSectionGrader } from './section-grader';
+import { Session, initSession } from './session';
+import { SetRelease, initSetRelease } from './set-release';
+import { StoredFile, initStoredFile } from './stored-file';
+import { Submission, initSubmission } from './submission';
+import { Template, initTemplate } from './template';
+import { TemplateVersion, initTemplateVersion } from './template-version';
+import { User, initUser } from './user';
+
+/** Binds every model to a connection and ties them together. May be called again for another connection. */
+export function initialiseModels(sequelize: Sequelize): void {
+  initDepartment(sequelize);
+  initUser(sequelize);
+  initSession(sequelize);
+  initLinkToken(sequelize);
+  initCourse(sequelize);
+  initSection(sequelize);
+  initMembership(sequelize);
+  initSectionGrader(sequelize);
+  initConflictOfInterest(sequelize);
+  initApiToken(sequelize);
+  initTemplate(sequelize);
+  initTemplateVersion(sequelize);
+  initProblemSet(sequelize);
+  initProblemSetItem(sequelize);
+  initExtension(sequelize);
+  initSetRelease(sequelize);
+  initStoredFile(sequelize);
+  initIntake(sequelize);
+  initIntakeRow(sequelize);
+  initDraw(sequelize);
+  initSavedAnswer(sequelize);
+  initSubmission(sequelize);
+  initAnswer(sequelize);
+  initAnswerCheck(sequelize);
+  initCreditEntry(sequelize);
+  initQueueItem(sequelize);
+  initRuling(sequelize);
+  initRulingReversal(sequelize);
+  initSecondMarking(sequelize);
+  initCreditRule(sequelize);
+  initCommentSnippet(sequelize);
+  initScoreReport(sequelize);
+  initDelivery(sequelize);
+  initAppeal(sequelize);
+  initAuditEvent(sequelize);
+  associatePeople();
+  associateQuestions();
+  associateAnswers();
+  associateMarking();
+  associateReports();
+}
+
+function associatePeople(): void {
+  Session.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  User.hasMany(Session, { as: 'sessions', foreignKey: 'userId' });
+  LinkToken.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  Course.belongsTo(Department, { as: 'department', foreignKey: 'departmentId' });
+  Department.hasMany(Course, { as: 'courses', foreignKey: 'departmentId' });
+  Section.belongsTo(Course, { as: 'course', foreignKey: 'courseId' });
+  Course.hasMany(Section, { as: 'sections', foreignKey: 'courseId' });
+  Membership.belongsTo(Course, { as: 'course', foreignKey: 'courseId' });
+  Course.hasMany(Membership, { as: 'memberships', foreignKey: 'courseId' });
+  Membership.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  User.hasMany(Membership, { as: 'memberships', foreignKey: 'userId' });
+  Membership.belongsTo(Section, { as: 'section', foreignKey: 'sectionId' });
+  Section.hasMany(Membership, { as: 'memberships', foreignKey: 'sectionId' });
+  SectionGrader.belongsTo(Section, { as: 'section', foreignKey: 'sectionId' });
+  Section.hasMany(SectionGrader, { as: 'graders', foreignKey: 'sectionId' });
+  SectionGrader.belongsTo(Membership, { as: 'membership', foreignKey: 'membershipId' });
+  Membership.hasMany(SectionGrader, { as: 'gradedSections', foreignKey: 'membershipId' });
+  ConflictOfInterest.belongsTo(Course, { as: 'course', foreignKey: 'courseId' });
+  ConflictOfInterest.belongsTo(User, { as: 'grader', foreignKey: 'graderId' });
+  ConflictOfInterest.belongsTo(User, { as: 'student', foreignKey: 'studentId' });
+  ApiToken.belongsTo(Course, { as: 'course', foreignKey: 'courseId' });
+  ApiToken.belongsTo(User, { as: 'creator', foreignKey: 'createdBy' });
+}
+
+function associateQuestions(): void {
+  Template.belongsTo(Department, { as: 'department', foreignKey: 'departmentId' });
+  Department.hasMany(Template, { as: 'templates', foreignKey: 'departmentId' });
+  Template.belongsTo(User, { as: 'creator', foreignKey: 'createdBy' });
+  TemplateVersion.belongsTo(Template, { as: 'template', foreignKey: 'templateId' });
+  Template.hasMany(TemplateVersion, { as: 'versions', foreignKey: 'templateId' });
+  ProblemSet.belongsTo(Course, { as: 'course', foreignKey: 'courseId' });
+  Course.hasMany(ProblemSet, { as: 'problemSets', foreignKey: 'courseId' });
+  ProblemSetItem.belongsTo(ProblemSet, { as: 'problemSet', foreignKey: 'problemSetId' });
+  ProblemSet.hasMany(ProblemSetItem, { as: 'items', foreignKey: 'problemSetId' });
+  ProblemSetItem.belongsTo(TemplateVersion, { as: 'templateVersion', foreignKey: 'templateVersionId' });
+  TemplateVersion.hasMany(ProblemSetItem, { as: 'items', foreignKey: 'templateVersionId' });
+  Extension.belongsTo(ProblemSet, { as: 'problemSet', foreignKey: 'problemSetId' });
+  ProblemSet.hasMany(Extension, { as: 'extensions', foreignKey: 'problemSetId' });
+  Extension.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  Extension.belongsTo(Section, { as: 'section', foreignKey: 'sectionId' });
+  SetRelease.belongsTo(ProblemSet, { as: 'problemSet', foreignKey: 'problemSetId' });
+  ProblemSet.hasMany(SetRelease, { as: 'releases', foreignKey: 'problemSetId' });
+  SetRelease.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+}
+
+function associateAnswers(): void {
+  StoredFile.belongsTo(Course, { as: 'course', foreignKey: 'courseId' });
+  Intake.belongsTo(ProblemSet, { as: 'problemSet', foreignKey: 'problemSetId' });
+  ProblemSet.hasMany(Intake, { as: 'intakes', foreignKey: 'problemSetId' });
+  Intake.belongsTo(StoredFile, { as: 'storedFile', foreignKey: 'storedFileId' });
+  Intake.belongsTo(User, { as: 'uploader', foreignKey: 'uploadedBy' });
+  IntakeRow.belongsTo(Intake, { as: 'intake', foreignKey: 'intakeId' });
+  Intake.hasMany(IntakeRow, { as: 'rows', foreignKey: 'intakeId' });
+  IntakeRow.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  IntakeRow.belongsTo(ProblemSetItem, { as: 'item', foreignKey: 'itemId' });
+  IntakeRow.belongsTo(Answer, { as: 'answer', foreignKey: 'answerId' });
+  Draw.belongsTo(ProblemSetItem, { as: 'item', foreignKey: 'itemId' });
+  ProblemSetItem.hasMany(Draw, { as: 'draws', foreignKey: 'itemId' });
+  Draw.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  Draw.belongsTo(TemplateVersion, { as: 'templateVersion', foreignKey: 'templateVersionId' });
+  SavedAnswer.belongsTo(Draw, { as: 'draw', foreignKey: 'drawId' });
+  Draw.hasMany(SavedAnswer, { as: 'savedAnswers', foreignKey: 'drawId' });
+  Submission.belongsTo(Draw, { as: 'draw', foreignKey: 'drawId' });
+  Draw.hasMany(Submission, { as: 'submissions', foreignKey: 'drawId' });
+  Submission.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  Submission.belongsTo(Intake, { as: 'intake', foreignKey: 'intakeId' });
+  Answer.belongsTo(Submission, { as: 'submission', foreignKey: 'submissionId' });
+  Submission.hasMany(Answer, { as: 'answers', foreignKey: 'submissionId' });
+  Answer.belongsTo(Draw, { as: 'draw', foreignKey: 'drawId' });
+  Draw.hasMany(Answer, { as: 'answers', foreignKey: 'drawId' });
+  Answer.belongsTo(AnswerCheck, { as: 'currentCheck', foreignKey: 'currentCheckId' });
+  Answer.belongsTo(CreditEntry, { as: 'currentCredit', foreignKey: 'currentCreditEntryId' });
+  AnswerCheck.belongsTo(Answer, { as: 'answer', foreignKey: 'answerId' });
+  Answer.hasMany(AnswerCheck, { as: 'checks', foreignKey: 'answerId' });
+  CreditEntry.belongsTo(Answer, { as: 'answer', foreignKey: 'answerId' });
+  Answer.hasMany(CreditEntry, { as: 'creditEntries', foreignKey: 'answerId' });
+  CreditEntry.belongsTo(Ruling, { as: 'ruling', foreignKey: 'rulingId' });
+  CreditEntry.belongsTo(User, { as: 'actor', foreignKey: 'actorId' });
+}
+
+function associateMarking(): void {
+  QueueItem.belongsTo(Answer, { as: 'answer', foreignKey: 'answerId' });
+  Answer.hasMany(QueueItem, { as: 'queueItems', foreignKey: 'answerId' });
+  QueueItem.belongsTo(ProblemSet, { as: 'problemSet', foreignKey: 'problemSetId' });
+  QueueItem.belongsTo(ProblemSetItem, { as: 'item', foreignKey: 'itemId' });
+  QueueItem.belongsTo(User, { as: 'holder', foreignKey: 'heldBy' });
+  QueueItem.belongsTo(Appeal, { as: 'appeal', foreignKey: 'appealId' });
+  Ruling.belongsTo(QueueItem, { as: 'queueItem', foreignKey: 'queueItemId' });
+  QueueItem.hasMany(Ruling, { as: 'rulings', foreignKey: 'queueItemId' });
+  Ruling.belongsTo(Answer, { as: 'answer', foreignKey: 'answerId' });
+  Answer.hasMany(Ruling, { as: 'rulings', foreignKey: 'answerId' });
+  Ruling.belongsTo(User, { as: 'grader', foreignKey: 'graderId' });
+  Ruling.belongsTo(Ruling, { as: 'coveringRuling', foreignKey: 'coveringRulingId' });
+  Ruling.hasMany(Ruling, { as: 'coveredRulings', foreignKey: 'coveringRulingId' });
+  RulingReversal.belongsTo(Ruling, { as: 'ruling', foreignKey: 'rulingId' });
+  Ruling.hasOne(RulingReversal, { as: 'reversal', foreignKey: 'rulingId' });
+  SecondMarking.belongsTo(Ruling, { as: 'ruling', foreignKey: 'rulingId' });
+  Ruling.hasOne(SecondMarking, { as: 'secondMarking', foreignKey: 'rulingId' });
+  SecondMarking.belongsTo(Answer, { as: 'answer', foreignKey: 'answerId' });
+  SecondMarking.belongsTo(ProblemSet, { as: 'problemSet', foreignKey: 'problemSetId' });
+  SecondMarking.belongsTo(User, { as: 'firstGrader', foreignKey: 'firstGraderId' });
+  SecondMarking.belongsTo(User, { as: 'grader', foreignKey: 'graderId' });
+  CreditRule.belongsTo(ProblemSetItem, { as: 'item', foreignKey: 'itemId' });
+  CommentSnippet.belongsTo(ProblemSet, { as: 'problemSet', foreignKey: 'problemSetId' });
+}
+
+function associateReports(): void {
+  ScoreReport.belongsTo(ProblemSet, { as: 'problemSet', foreignKey: 'problemSetId' });
+  ScoreReport.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  Delivery.belongsTo(ScoreReport, { as: 'scoreReport', foreignKey: 'scoreReportId' });
+  ScoreReport.hasOne(Delivery, { as: 'delivery', foreignKey: 'scoreReportId' });
+  Appeal.belongsTo(SetRelease, { as: 'setRelease', foreignKey: 'setReleaseId' });
+  Appeal.belongsTo(ProblemSet, { as: 'problemSet', foreignKey: 'problemSetId' });
+  Appeal.belongsTo(Answer, { as: 'answer', foreignKey: 'answerId' });
+  Answer.hasMany(Appeal, { as: 'appeals', foreignKey: 'answerId' });
+  Appeal.belongsTo(Draw, { as: 'draw', foreignKey: 'drawId' });
+  Appeal.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  Appeal.belongsTo(User, { as: 'answerer', foreignKey: 'answeredBy' });
+  Appeal.belongsTo(Ruling, { as: 'ruling', foreignKey: 'rulingId' });
+}
