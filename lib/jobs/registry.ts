@@ -1,0 +1,12 @@
+import { type JobHandlers } from './job-handler';
+
+/**
+ * The handler of every job. A job whose handler is missing here stays in the queue until a worker has one.
+ */
+export const jobHandlers: JobHandlers = {};
+
+/** Jobs that the clock puts into the queue: minute, hour, day of month, month, day of week (UTC). */
+export const recurringJobs = [
+  { name: 'expire-leases', at: '* * * * *' },
+  { name: 'close-due-sets', at: '* * * * *' },
+] as const;
