@@ -66,8 +66,9 @@ export function openDatabase(url: string, options: { poolSize: number; guarded: 
   });
 }
 
+/** The environment is checked as a whole when a process starts; here an odd value only means the default. */
 function poolSize(): number {
-  const wanted = Number(process.env.DATABASE_POOL_SIZE ?? DEFAULT_POOL_SIZE);
+  const wanted = Number(process.env.DATABASE_POOL ?? DEFAULT_POOL_SIZE);
   return Number.isInteger(wanted) && wanted >= 1 && wanted <= 200 ? wanted : DEFAULT_POOL_SIZE;
 }
 
