@@ -5,21 +5,47 @@
 export const paths = {
   home: () => '/',
   signIn: (next?: string) => (next ? `/sign-in?${new URLSearchParams({ next }).toString()}` : '/sign-in'),
-  forgottenPassword: () => '/forgotten-password',
-  setPassword: (token: string) => `/set-password?${new URLSearchParams({ token }).toString()}`,
+  invitation: (token: string) => `/invitation/${token}`,
+  forgottenPassword: () => '/password/forgot',
+  newPassword: (token: string) => `/password/${token}`,
+  account: () => '/account',
+
+  courses: () => '/courses',
   course: (courseId: string) => `/courses/${courseId}`,
-  sets: (courseId: string) => `/courses/${courseId}/sets`,
-  set: (courseId: string, setId: string) => `/courses/${courseId}/sets/${setId}`,
-  report: (courseId: string, setId: string) => `/courses/${courseId}/sets/${setId}/report`,
-  queue: (courseId: string) => `/courses/${courseId}/queue`,
-  queueItem: (courseId: string, itemId: string) => `/courses/${courseId}/queue/${itemId}`,
-  intakes: (courseId: string) => `/courses/${courseId}/intakes`,
-  intake: (courseId: string, intakeId: string) => `/courses/${courseId}/intakes/${intakeId}`,
-  templates: (courseId: string) => `/courses/${courseId}/templates`,
-  template: (courseId: string, templateId: string) => `/courses/${courseId}/templates/${templateId}`,
-  consistency: (courseId: string) => `/courses/${courseId}/consistency`,
   roster: (courseId: string) => `/courses/${courseId}/roster`,
+  rosterPerson: (courseId: string, membershipId: string) => `/courses/${courseId}/roster/${membershipId}`,
+  log: (courseId: string) => `/courses/${courseId}/log`,
+  tokens: (courseId: string) => `/courses/${courseId}/tokens`,
+
+  newSet: (courseId: string) => `/courses/${courseId}/sets/new`,
+  set: (courseId: string, setId: string) => `/courses/${courseId}/sets/${setId}`,
+  intakes: (courseId: string, setId: string) => `/courses/${courseId}/sets/${setId}/intake`,
+  intake: (courseId: string, setId: string, intakeId: string) =>
+    `/courses/${courseId}/sets/${setId}/intakes/${intakeId}`,
+  queue: (courseId: string, setId: string) => `/courses/${courseId}/sets/${setId}/queue`,
+  desk: (courseId: string, setId: string, queueItemId: string) =>
+    `/courses/${courseId}/sets/${setId}/desk/${queueItemId}`,
+  release: (courseId: string, setId: string) => `/courses/${courseId}/sets/${setId}/release`,
+  deliveries: (courseId: string, setId: string) => `/courses/${courseId}/sets/${setId}/deliveries`,
+  reportOf: (courseId: string, setId: string, userId: string) => `/courses/${courseId}/sets/${setId}/reports/${userId}`,
+  consistency: (courseId: string, setId: string) => `/courses/${courseId}/sets/${setId}/consistency`,
+
+  templates: () => '/templates',
+  newTemplate: () => '/templates/new',
+  template: (templateId: string) => `/templates/${templateId}`,
+
+  work: () => '/work',
+  workSet: (setId: string) => `/work/${setId}`,
+  workReport: (setId: string) => `/work/${setId}/report`,
+
+  reading: () => '/reading',
   bench: () => '/bench',
+
+  adminCourses: () => '/admin/courses',
+  adminCourse: (courseId: string) => `/admin/courses/${courseId}`,
+  adminAccounts: () => '/admin/accounts',
+  adminMail: () => '/admin/mail',
+  adminLog: () => '/admin/log',
 } as const;
 
 /** A path as a whole address, for mail and for callers outside the browser. */

@@ -6,7 +6,7 @@ export function safeNext(value: unknown): string {
   if (typeof value !== 'string' || !value.startsWith('/') || value.length > 2000) return '/';
   const base = 'http://halfmark.invalid';
   const url = URL.canParse(value, base) ? new URL(value, base) : null;
-  if (url === null || url.origin !== base || /[\\\u0000-\u001f]/.test(value)) return '/';
+  if (url === null || url.origin !== base || /[\\\p{Cc}]/u.test(value)) return '/';
   const path = url.pathname + url.search;
   return path.startsWith('//') || path.startsWith('/sign-in') || path.startsWith('/api/') ? '/' : path;
 }

@@ -1,0 +1,59 @@
+'use client';
+
+import Link from 'next/link';
+import { useActionState } from 'react';
+import { Field } from '@/components/ui/fields';
+import { FormErrorSummary } from '@/components/ui/form-error-summary';
+import { SubmitButton } from '@/components/ui/submit-button';
+import { paths } from '@/lib/paths';
+import { signInAndWait, type SignInResult } from './sign-in';
+
+const words: Record<Exclude<SignInResult, 'welcome'>, string> = {
+  refused: 'This e-mail and password do not go together. Look at both and try again.',
+  'too-many': 'There were too many failed tries. Wait a quarter of an hour, or set a new password by mail.',
+  failed: 'Signing in did not work just now. Please try again.',
+};
+
+type State = { email: string; result: SignInResult | null };
+
+/** E-mail and password. A refusal keeps the e-mail and never says which of the two was wrong. */
+export function SignInForm({ next }: { next: string }) {
+  const [state, send] = useActionState(
+    async (_before: State, form: FormData): Promise<State> => {
+      const email = text(form, 'email');
+      const result = await signInAndWait(email, text(form, 'password'));
+      // A whole navigation, so that nothing rendered for a signed-out visitor is shown again.
+      if (result === 'welcome') window.location.assign(next);
+      return { email, result };
+    },
+    { email: '', result: null },
+  );
+  const { email, result } = state;
+  const faults = result === null || result === 'welcome' ? {} : { '': words[result] };
+  return (
+    <form action={send} className="grid gap-4">
+      <FormErrorSummary errors={faults} title="You are not signed in" />
+      <Field
+        name="email"
+        label="E-mail"
+        type="email"
+        autoComplete="username"
+        key={`email ${email}`}
+        defaultValue={email}
+        maxLength={254}
+      />
+      <Field name="password" label="Password" type="password" autoComplete="current-password" maxLength={1000} />
+      <div className="flex flex-wrap items-center gap-x-6 gap-y-3">
+        <SubmitButton pendingWords="Signing in">Sign in</SubmitButton>
+        <Link href={paths.forgottenPassword()} className="text-small">
+          Forgotten your password?
+        </Link>
+      </div>
+    </form>
+  );
+}
+
+function text(form: FormData, name: string): string {
+  const value = form.get(name);
+  return typeof value === 'string' ? value : '';
+}
