@@ -1,10 +1,10 @@
-import { shareOfCredit, type Thousandths } from './credit';
+import { type Thousandths } from './credit';
 import type { FlagReason } from './flag-reasons';
 import type { SetPolicy } from './set-policy';
 import type { Verdict } from './verdict';
 
-/** What an author or a set's rule gives for one slip: a share of the part's credit in thousandths, or a person decides. */
-export type SlipCredit = { slip: string; share: number } | { slip: string; share: 'person' };
+/** What an author or a set's rule gives for one slip: a credit, or a person decides. */
+export type SlipCredit = { slip: string; credit: Thousandths | 'person' };
 
 /** What the checker found of one answer, as far as marking goes. */
 export type CheckOutcome = {
@@ -80,24 +80,24 @@ function suggestCredit(
       reasons.push('unreadable');
       return { credit: null, rule: null };
     case 'differs':
-      return creditOfSlips(check.slips, part, reasons);
+      return creditOfSlips(check.slips, part.slipCredits, reasons);
   }
 }
 
 function creditOfSlips(
   slips: readonly string[],
-  part: { outOf: Thousandths; slipCredits: readonly SlipCredit[] },
+  slipCredits: readonly SlipCredit[],
   reasons: FlagReason[],
 ): { credit: Thousandths | null; rule: string | null } {
-  const fitting = slips.flatMap((slip) => part.slipCredits.find((credit) => credit.slip === slip) ?? []);
+  const fitting = slips.flatMap((slip) => slipCredits.find((given) => given.slip === slip) ?? []);
   const first = fitting[0];
   if (first === undefined) {
     reasons.push('no-credited-slip');
     return { credit: null, rule: null };
   }
-  if (first.share === 'person' || fitting.some((credit) => credit.share !== first.share)) {
+  if (first.credit === 'person' || fitting.some((given) => given.credit !== first.credit)) {
     reasons.push('slip-left-to-person');
     return { credit: null, rule: first.slip };
   }
-  return { credit: shareOfCredit(part.outOf, first.share, 1000), rule: first.slip };
+  return { credit: first.credit, rule: first.slip };
 }

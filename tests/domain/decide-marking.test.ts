@@ -13,9 +13,9 @@ const outcome = (change: Partial<CheckOutcome>): CheckOutcome => ({
 const part = {
   outOf: 4000,
   slipCredits: [
-    { slip: 'sign', share: 500 },
-    { slip: 'conjugated', share: 750 },
-    { slip: 'factor-two', share: 'person' as const },
+    { slip: 'sign', credit: 2000 },
+    { slip: 'conjugated', credit: 3000 },
+    { slip: 'factor-two', credit: 'person' as const },
   ],
 };
 
