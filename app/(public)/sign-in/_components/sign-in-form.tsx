@@ -2,6 +2,7 @@
 
 import Link from 'next/link';
 import { useActionState } from 'react';
+import { type FieldErrors } from '@/components/ui/field-frame';
 import { Field } from '@/components/ui/fields';
 import { FormErrorSummary } from '@/components/ui/form-error-summary';
 import { SubmitButton } from '@/components/ui/submit-button';
@@ -29,7 +30,7 @@ export function SignInForm({ next }: { next: string }) {
     { email: '', result: null },
   );
   const { email, result } = state;
-  const faults = result === null || result === 'welcome' ? {} : { '': words[result] };
+  const faults: FieldErrors = result === null || result === 'welcome' ? {} : { '': words[result] };
   return (
     <form action={send} className="grid gap-4">
       <FormErrorSummary errors={faults} title="You are not signed in" />
