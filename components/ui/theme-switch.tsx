@@ -1,7 +1,7 @@
 'use client';
 
 import { useState } from 'react';
-import { type Theme, themeCookie } from './theme';
+import { applyTheme, type Theme } from './theme';
 
 const choices: readonly { theme: Theme; words: string }[] = [
   { theme: 'paper', words: 'paper' },
@@ -9,17 +9,12 @@ const choices: readonly { theme: Theme; words: string }[] = [
   { theme: 'device', words: 'as the device' },
 ];
 
-const year = 365 * 24 * 3600;
-
 /** Three words that set the page's theme at once and keep the choice in a cookie for the next page's server. */
 export function ThemeSwitch({ initial }: { initial: Theme }) {
   const [chosen, setChosen] = useState(initial);
   const choose = (theme: Theme) => {
     setChosen(theme);
-    if (theme === 'device') delete document.documentElement.dataset.theme;
-    else document.documentElement.dataset.theme = theme;
-    const life = theme === 'device' ? 0 : year;
-    document.cookie = `${themeCookie}=${theme}; path=/; max-age=${life}; samesite=lax`;
+    applyTheme(theme);
   };
   return (
     <div role="group" aria-label="Theme" className="flex flex-wrap gap-x-3">

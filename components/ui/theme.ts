@@ -7,3 +7,13 @@ export const themeCookie = 'halfmark_theme';
 export function readTheme(value: string | undefined): Theme {
   return value === 'paper' || value === 'night' ? value : 'device';
 }
+
+const year = 365 * 24 * 3600;
+
+/** In the browser: sets the theme of the page at once and keeps it in a cookie for a year; `device` forgets it. */
+export function applyTheme(theme: Theme): void {
+  if (theme === 'device') delete document.documentElement.dataset.theme;
+  else document.documentElement.dataset.theme = theme;
+  const life = theme === 'device' ? 0 : year;
+  document.cookie = `${themeCookie}=${theme}; path=/; max-age=${life}; samesite=lax`;
+}

@@ -1,22 +1,21 @@
+import { type Verdict } from '@/lib/checker/contract';
 import type { ReactNode } from 'react';
 
-export type VerdictName = 'agrees' | 'differs' | 'undecided' | 'unreadable';
-
-const words: Record<VerdictName, string> = {
+const words: Record<Verdict, string> = {
   agrees: 'Agrees',
   differs: 'Differs',
   undecided: 'Undecided',
   unreadable: 'Unreadable',
 };
 
-const colours: Record<VerdictName, string> = {
+const colours: Record<Verdict, string> = {
   agrees: 'text-verdigris',
   differs: 'text-madder',
   undecided: 'text-ochre',
   unreadable: 'text-grey',
 };
 
-const strokes: Record<VerdictName, ReactNode> = {
+const strokes: Record<Verdict, ReactNode> = {
   agrees: <path d="M3 6.5h18M3 12h18M3 17.5h18" />,
   differs: <path d="M3 6.5h18M3 12h18M3 17.5h18M7.5 22 16.5 2" />,
   undecided: (
@@ -35,7 +34,7 @@ const strokes: Record<VerdictName, ReactNode> = {
 };
 
 export interface VerdictSignProps {
-  readonly verdict: VerdictName;
+  readonly verdict: Verdict;
   /** `margin`: large, words beside; `line`: in running text or a table cell. */
   readonly size?: 'margin' | 'line';
   /** The quiet line below (margin) or behind (line): "slip: complex-conjugated". */
@@ -67,7 +66,7 @@ export function VerdictSign({ verdict, size = 'line', detail, word = words[verdi
 }
 
 /** The sign alone, drawn so that it is the same with every font. Hidden from a screen reader: words must stand beside it. */
-export function Sign({ verdict, className }: { verdict: VerdictName; className?: string }) {
+export function Sign({ verdict, className }: { verdict: Verdict; className?: string }) {
   return (
     <svg
       viewBox="0 0 24 24"
