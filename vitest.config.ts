@@ -26,7 +26,7 @@ export default defineConfig({
         extends: true,
         test: {
           name: 'integration',
-          include: ['tests/{migrations,services,queries,jobs,routes,auth,queue}/**/*.test.ts'],
+          include: ['tests/{db,migrations,services,queries,jobs,routes,auth,queue}/**/*.test.ts'],
           setupFiles: ['tests/setup/block-network.ts', 'tests/setup/database.ts'],
           fileParallelism: false,
           testTimeout: 60_000,
