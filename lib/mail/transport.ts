@@ -34,11 +34,12 @@ export async function handOffTo(smtpUrl: string, message: SendMailOptions): Prom
   // Mail is made from our own text alone: it may neither read files nor fetch addresses.
   const transport = createTransport({ url: smtpUrl, disableFileAccess: true, disableUrlAccess: true, ...patience });
   transport.use('stream', (mail, done) => {
-    // Asked for once the server has greeted us and the message is about to be offered.
-    mail.message.transform(() => {
+    // The message flows into this once the server has greeted us and is about to be offered it, never before.
+    const gate = new PassThrough();
+    gate.once('pipe', () => {
       begun = true;
-      return new PassThrough();
     });
+    mail.message.transform(gate);
     done();
   });
   try {

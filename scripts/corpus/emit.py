@@ -1,0 +1,186 @@
+"""From pairs of trees to labelled lines: checks every label by the second method before a line is written."""
+
+import json
+import os
+import pickle
+import random
+import zlib
+from collections import Counter
+
+import mpmath
+
+import label
+from label import agree_at, environment, numeric
+from slips import value_slips
+from tree import N, walk
+from values import Points, evaluate
+from writer import Writer
+
+MODES = ("ascii", "uni", "tex", "mix")
+FOLDER = os.path.join(os.path.dirname(__file__), "..", "..", "tests", "corpus")
+
+
+class Topic:
+    """Collects the lines of one topic; `prefix` begins each id, `symbols` is the default table."""
+
+    def __init__(self, name, prefix, symbols=None):
+        self.name, self.prefix, self.symbols = name, prefix, symbols or {}
+        self.lines = {"agrees": [], "differs": [], "undecided": []}
+        self.seen = set()
+        self.doubts = []
+        self.rng = random.Random(zlib.crc32(name.encode()))
+
+    # --- the three kinds of line --------------------------------------------------------------------------------------
+
+    def agree(self, kind, ref, *answers, why, n=2, symbols=None, options=None, fix=None, substitute=None, proof=None, form=None, loose=True, modes=MODES, reftext=None, wild=False):
+        """Answers that agree with `ref`: each is written `n` times in different spellings (a hand-written text once)."""
+        symbols, options = self.table(symbols, ref, answers), options or {}
+        for ans in answers:
+            good, bad, witness = numeric(kind, ref, ans, symbols, options, fix=fix)
+            if bad or good < 8:
+                self.doubt("agree", kind, ref, ans, f"{good} agree, {bad} differ", witness)
+                continue
+            ways = label.exact(kind, ref, ans, symbols, options, substitute)
+            if not ways and not proof:
+                self.doubt("agree", kind, ref, ans, "no exact proof", None)
+                continue
+            method = f"SymPy ({', '.join(ways)})" if ways else f"by hand: {proof}"
+            source = f"{method}; equal to 55 digits at {good} points of the domain"
+            for text in self.spell(ans, kind, n, loose, modes, wild):
+                self.add("agrees", kind, self.reference(ref, kind, reftext), text, symbols, options, why=why, source=source, form=form)
+
+    def differ(self, kind, ref, *answers, why, n=1, symbols=None, options=None, fix=None, slips=None, pair=None, exactly=False, form=None, modes=MODES, reftext=None, tree_ref=None, quiet=False):
+        """Answers that differ from `ref` at a point of the domain; value slips that fit there are found and added to `slips`."""
+        symbols, options = self.table(symbols, ref, answers), options or {}
+        for ans in answers:
+            good, bad, witness = numeric(kind, ref, ans, symbols, options, fix=fix)
+            if not bad:
+                self.doubt("differ", kind, ref, ans, f"agrees at all {good} points", None)
+                continue
+            found = set(slips or []) | (set() if quiet else value_slips(kind, ref, ans, symbols, options, fix))
+            for text in self.spell(ans, kind, n, False, modes, False):
+                self.add(
+                    "differs", kind, self.reference(ref, kind, reftext), text, symbols, options, why=why,
+                    source="mpmath, 80 digits: " + shown(witness), slips=in_order(found), pair=pair, exactly=exactly, form=form,
+                )
+
+    def plain(self, verdict, kind, reference, answer, why, source, symbols=None, options=None, slips=None, pair=None, allowed=None, form=None, exactly=False):
+        """A line whose label comes from a hand argument."""
+        self.add(verdict, kind, reference, answer, symbols if symbols is not None else self.symbols, options or {}, why=why, source=source, slips=in_order(set(slips or [])), pair=pair, allowed=allowed, form=form, exactly=exactly)
+
+    # --- parts --------------------------------------------------------------------------------------------------------
+
+    def table(self, symbols, ref, answers):
+        """The declared symbols that the two use."""
+        table = {**self.symbols, **(symbols or {})}
+        used = {p.a[0] for n in (ref, *answers) for p in walk(n) if p.k == "sym"}
+        missing = used - set(table)
+        if missing:
+            raise ValueError(f"{self.name}: undeclared {missing}")
+        kept = {k: v for k, v in table.items() if k in used or (symbols and k in symbols)}
+        return kept
+
+    def reference(self, ref, kind, given):
+        if given:
+            return given
+        if ref.k == "raw":
+            return ref.a[0]
+        return Writer("ascii", random.Random(7), euler="e" not in self.symbols).text(ref, kind)
+
+    def spell(self, ans, kind, n, loose, modes, wild):
+        if ans.k == "raw":
+            return [ans.a[0]]
+        out = []
+        start = self.rng.randrange(len(modes))
+        for k in range(n * 3):
+            mode = modes[(start + k) % len(modes)]
+            writer = Writer(mode, self.rng, loose=loose and self.rng.random() < 0.5, euler="e" not in self.symbols)
+            text = writer.text(ans, kind)
+            if mode == "tex":
+                text = self.decorate(text, kind)
+            if text not in out:
+                out.append(text)
+            if len(out) == n:
+                break
+        return out
+
+    def decorate(self, text, kind):
+        """Now and then the signs people put around mathematics."""
+        r = self.rng.random()
+        if r < 0.12 and "=" not in text:
+            return f"${text}$"
+        if r < 0.17:
+            return text + "."
+        return text
+
+    def add(self, verdict, kind, reference, answer, symbols, options, why, source, slips=None, pair=None, exactly=False, allowed=None, form=None):
+        key = (kind, reference, answer, json.dumps(options, sort_keys=True), json.dumps(symbols, sort_keys=True))
+        if key in self.seen:
+            return
+        self.seen.add(key)
+        line = {"id": "", "kind": kind, "reference": reference, "answer": answer, "symbols": symbols}
+        if options:
+            line["options"] = options
+        line["verdict"] = verdict
+        if slips:
+            line["slipsExactly" if exactly else "slips"] = list(slips)
+        for name, value in (("pair", pair), ("allowed", allowed), ("form", form)):
+            if value:
+                line[name] = value
+        line["why"], line["source"] = why, source
+        self.lines[verdict].append(line)
+
+    def doubt(self, wanted, kind, ref, ans, reason, witness):
+        show = lambda n: Writer("ascii", random.Random(7)).text(n, kind)
+        self.doubts.append(f"{self.name}: wanted {wanted} {kind}: {show(ref)}  |  {show(ans)}: {reason} {shown(witness) if witness else ''}")
+
+    def write(self):
+        """Writes the topic's files with running ids and returns how many lines each verdict has."""
+        for verdict, lines in self.lines.items():
+            path = os.path.join(FOLDER, "equivalence", verdict, f"{self.name}.jsonl")
+            if not lines:
+                continue
+            with open(path, "w", encoding="utf-8") as f:
+                for k, line in enumerate(lines, 1):
+                    line["id"] = f"{self.prefix}-{verdict[:-1] if verdict != 'undecided' else 'open'}-{k:04d}"
+                    f.write(json.dumps(line, ensure_ascii=False) + "\n")
+        return Counter({v: len(lines) for v, lines in self.lines.items()})
+
+
+ORDER = (
+    "sign factor-half factor-two hbar-power missing-i conjugated transposed commutator-order half-angle double-angle sine-cosine missing-two-pi "
+    "rounded-decimal axes-permuted missing-root missing-constant one-eigenvalue centred-eigenvalues states-swapped not-normalised pauli-for-spin "
+    "spin-for-pauli power-of-ten wrong-unit"
+).split()
+
+
+def in_order(slips):
+    """Slips in the order of the catalogue."""
+    return sorted(slips, key=ORDER.index)
+
+
+def shown(witness):
+    """A witness in a few digits."""
+    env, r, a = witness
+    at = ", ".join(f"{k} = {mpmath.nstr(v, 6)}" for k, v in env.items())
+    return f"at {at}: reference {digits(r)}, answer {digits(a)}"
+
+
+def digits(v):
+    if isinstance(v, tuple):
+        return "(" + ", ".join(digits(x) for x in v[1]) + ")"
+    if isinstance(v, list):
+        return "[" + ", ".join(digits(x) for x in v) + "]"
+    return mpmath.nstr(mpmath.chop(mpmath.mpc(v), 1e-30), 15).replace("(", "").replace(")", "")
+
+
+def load_proofs(path):
+    if path and os.path.exists(path):
+        with open(path, "rb") as f:
+            label.PROOFS.update(pickle.load(f))
+
+
+def save_proofs(path):
+    if path:
+        with open(path, "wb") as f:
+            pickle.dump(label.PROOFS, f)

@@ -1,0 +1,157 @@
+"""Truths that hang on the domain of a symbol, branches of many-valued functions, and near misses."""
+
+from emit import Topic
+from tree import *
+
+
+def domains():
+    t = Topic("scalar-domain", "dom")
+    x, y, a, b, th, n, z, ph = syms("x y a b theta n z phi")
+    real = {"x": "real", "y": "real", "a": "real", "b": "real"}
+    pos = {"x": "positive", "y": "positive", "a": "positive", "b": "positive"}
+    nonneg = {"x": "nonnegative", "a": "nonnegative", "b": "nonnegative"}
+    upper = {"theta": {"between": ["0", "pi"]}}
+    A, D = t.agree, t.differ
+    A("scalar", x, sqrt(x**2), absv(x), why="x is positive", symbols=pos, n=3)
+    A("scalar", x, sqrt(x**2), absv(x), (x**2) ** half(), why="x is nonnegative", symbols=nonneg, n=2)
+    D("scalar", x, sqrt(x**2), absv(x), (x**2) ** half(), why="x may be negative", symbols=real, n=2)
+    A("scalar", absv(x), sqrt(x**2), (x**2) ** half(), absv(-x), sqrt(x * x), why="x is real", symbols=real, n=2)
+    D("scalar", absv(x), x, -x, why="x may have either sign", symbols=real, n=2)
+    A("scalar", absv(x) ** 2, x**2, absv(x**2), why="x is real", symbols=real, n=2)
+    D("scalar", absv(z) ** 2, z**2, why="z is complex", symbols={"z": "complex"}, n=2)
+    D("scalar", sqrt(z**2), z, absv(z), why="z is complex", symbols={"z": "complex"}, n=2)
+    A("scalar", absv(a * b), absv(a) * absv(b), why="moduli multiply", symbols=real, n=2)
+    A("scalar", sqrt(a * b), sqrt(a) * sqrt(b), why="both positive", symbols=pos, n=3)
+    D("scalar", sqrt(a * b), -(sqrt(a) * sqrt(b)), why="the other root", symbols=pos, n=2)
+    A("scalar", sqrt(a / b), sqrt(a) / sqrt(b), sqrt(a * b) / b, why="both positive", symbols=pos, n=2)
+    A("scalar", sqrt(x**4), x**2, absv(x) ** 2, why="an even power", symbols=real, n=2)
+    A("scalar", sqrt(x**2 * y), x * sqrt(y), sqrt(y) * sqrt(x) ** 2, why="both positive", symbols=pos, n=2)
+    A("scalar", sqrt(a**2 * b), absv(a) * sqrt(b), why="b positive, a real", symbols={"a": "real", "b": "positive"}, n=2)
+    D("scalar", sqrt(a**2 * b), a * sqrt(b), why="a may be negative", symbols={"a": "real", "b": "positive"}, n=2)
+    D("scalar", sqrt(a**2 + b**2), a + b, absv(a) + absv(b), why="root of a sum taken term by term", symbols=real, n=2)
+    A("scalar", sqrt(a**2 + 2 * a * b + b**2), a + b, why="both positive", symbols=pos, n=2, proof="sqrt(u^2) = u for the positive u = a + b")
+    A("scalar", sqrt(a**2 + 2 * a * b + b**2), absv(a + b), why="a perfect square", symbols=real, n=2, proof="sqrt(u^2) = |u| for the real u = a + b")
+    D("scalar", sqrt(a**2 + 2 * a * b + b**2), a + b, why="a + b may be negative", symbols=real, n=2)
+    A("scalar", absv(sin(th)), sqrt(1 - cos(th) ** 2), sqrt(sin(th) ** 2), why="theta is real", symbols={"theta": "real"}, n=2, proof="1 - cos^2 = sin^2 and sqrt(u^2) = |u| for real u")
+    D("scalar", sin(th), sqrt(1 - cos(th) ** 2), absv(sin(th)), why="the sine may be negative", symbols={"theta": "real"}, n=3)
+    A("scalar", sin(th), sqrt(1 - cos(th) ** 2), absv(sin(th)), why="the sine is not negative between 0 and pi", symbols=upper, n=3, proof="sin theta >= 0 on [0, pi], so sqrt(sin^2 theta) = sin theta")
+    D("scalar", cos(th), sqrt(1 - sin(th) ** 2), why="the cosine is negative above pi/2", symbols=upper, n=2)
+    A("scalar", cos(th), sqrt(1 - sin(th) ** 2), why="the cosine is not negative between -pi/2 and pi/2", symbols={"theta": {"between": ["-pi/2", "pi/2"]}}, n=2, proof="cos theta >= 0 there")
+    A("scalar", cos(th / 2), sqrt((1 + cos(th)) / 2), sqrt(half() * (1 + cos(th))), sqrt(1 + cos(th)) / sqrt(2), why="half angle between 0 and pi", symbols=upper, n=3, proof="cos^2(theta/2) = (1 + cos theta)/2 and cos(theta/2) >= 0 on [0, pi]")
+    A("scalar", sin(th / 2), sqrt((1 - cos(th)) / 2), sqrt(1 - cos(th)) / sqrt(2), why="half angle between 0 and pi", symbols=upper, n=3, proof="sin^2(theta/2) = (1 - cos theta)/2 and sin(theta/2) >= 0 on [0, pi]")
+    A("scalar", sin(th / 2), sqrt((1 - cos(th)) / 2), why="half angle between 0 and 2 pi", symbols={"theta": {"between": ["0", "2*pi"]}}, n=2, proof="sin(theta/2) >= 0 on [0, 2 pi]")
+    D("scalar", cos(th / 2), sqrt((1 + cos(th)) / 2), why="the half-angle cosine is negative above pi", symbols={"theta": {"between": ["0", "2*pi"]}}, n=2)
+    D("scalar", cos(th / 2), sqrt((1 + cos(th)) / 2), why="theta is any real number", symbols={"theta": "real"}, n=2)
+    D("scalar", sin(th / 2), sqrt((1 - cos(th)) / 2), why="theta is any real number", symbols={"theta": "real"}, n=2)
+    D("scalar", cos(th / 2), -sqrt((1 + cos(th)) / 2), why="sign", symbols=upper, n=1)
+    A("scalar", absv(cos(th / 2)), sqrt((1 + cos(th)) / 2), why="with the modulus it holds everywhere", symbols={"theta": "real"}, n=2, proof="cos^2(theta/2) = (1 + cos theta)/2 and sqrt(u^2) = |u|")
+    D("scalar", cos(n * pi), (-q(1)) ** n, why="n is real here: (-1)^n is not real", symbols={"n": "real"}, n=2)
+    A("scalar", cos(n * pi / 2) ** 2, (1 + (-q(1)) ** n) / 2, why="n is an integer", symbols={"n": "integer"}, n=2, proof="cos^2(n pi/2) = (1 + cos n pi)/2 and cos n pi = (-1)^n")
+    A("scalar", (-q(1)) ** (2 * n), q(1), why="an even power", symbols={"n": "integer"})
+    A("scalar", sin((n + half()) * pi), (-q(1)) ** n, why="half-integer multiples of pi", symbols={"n": "integer"}, n=2, proof="sin(n pi + pi/2) = cos n pi = (-1)^n")
+    D("scalar", sin((n + half()) * pi), q(1), why="wrong for odd n", symbols={"n": "integer"})
+    A("scalar", tan(n * pi), q(0), why="n is an integer", symbols={"n": "integer"})
+    D("scalar", sin(n * pi), q(0), why="n is real", symbols={"n": "real"})
+    A("scalar", conj(x), x, why="x is real", symbols=real, n=2)
+    A("scalar", re(x), x, why="x is real", symbols=real, n=2)
+    A("scalar", im(x), q(0), why="x is real", symbols=real, n=1)
+    D("scalar", conj(z), z, why="z is complex", symbols={"z": "complex"}, n=2)
+    A("scalar", x / x, q(1), why="equal wherever both are defined", symbols=real)
+    A("scalar", x, x**2 / x, (x**3 + x) / (x**2 + 1), why="equal wherever both are defined", symbols=real, n=2)
+    A("scalar", (x**2 - 1) / (x - 1), x + 1, why="equal wherever both are defined", symbols=real, n=2)
+    D("scalar", absv(x) / x, q(1), why="it is the sign of x", symbols={"x": "nonzero"})
+    A("scalar", absv(x) / x, x / absv(x), why="the sign of x either way", symbols={"x": "nonzero"}, n=2, proof="|x|^2 = x^2 for real x")
+    A("scalar", absv(x) / x, q(1), why="x is positive", symbols={"x": "positive"})
+    # branches
+    A("scalar", ln(a * b), ln(a) + ln(b), why="both positive", symbols=pos, n=2)
+    A("scalar", ln(absv(x)), half() * ln(x**2), why="even in x", symbols={"x": "nonzero"}, n=2, proof="ln x^2 = ln |x|^2 = 2 ln |x| for real nonzero x")
+    D("scalar", ln(x**2), 2 * ln(x), why="the logarithm of a negative x is complex", symbols={"x": "nonzero"}, n=2)
+    D("scalar", ln(exp(i * th)), i * th, why="the principal logarithm jumps", symbols={"theta": {"between": ["0", "6*pi"]}}, n=2)
+    A("scalar", ln(exp(i * th)), i * th, why="theta lies in the principal strip", symbols={"theta": {"between": ["-3", "3"]}}, n=2, proof="the principal logarithm inverts the exponential for -pi < theta <= pi")
+    A("scalar", ln(exp(x)), x, why="x is real", symbols=real, n=2)
+    D("scalar", asin(sin(th)), th, why="only between -pi/2 and pi/2", symbols={"theta": "real"}, n=2)
+    A("scalar", asin(sin(th)), th, why="theta lies in the principal range", symbols={"theta": {"between": ["-pi/2", "pi/2"]}}, n=2, proof="arcsin inverts sin on [-pi/2, pi/2]")
+    A("scalar", acos(cos(th)), th, why="theta lies in the principal range", symbols=upper, n=3, proof="arccos inverts cos on [0, pi]")
+    D("scalar", acos(cos(th)), th, why="only between 0 and pi", symbols={"theta": "real"}, n=2)
+    D("scalar", atan(tan(th)), th, why="only between -pi/2 and pi/2", symbols=upper, n=2)
+    A("scalar", atan(tan(th)), th, why="theta lies in the principal range", symbols={"theta": {"between": ["-pi/2", "pi/2"]}}, n=2, proof="arctan inverts tan on (-pi/2, pi/2)")
+    A("scalar", tan(atan(x)), x, why="inverse from the right", symbols=real, n=3)
+    A("scalar", sin(acos(x)), sqrt(1 - x**2), why="x between -1 and 1", symbols={"x": {"between": ["-1", "1"]}}, n=3)
+    A("scalar", cos(atan(x)), 1 / sqrt(1 + x**2), why="x is real", symbols=real, n=3)
+    A("scalar", cos(atan(y / x)), x / sqrt(x**2 + y**2), why="x is positive", symbols=pos, n=2)
+    D("scalar", cos(atan(y / x)), x / sqrt(x**2 + y**2), why="x may be negative", symbols={"x": "nonzero", "y": "real"}, n=2)
+    A("scalar", atan2(y, x), atan(y / x), why="first quadrant", symbols=pos, n=2, proof="atan2 is arctan(y/x) for x > 0 (definition)")
+    D("scalar", atan2(y, x), atan(y / x), why="other quadrants", symbols={"x": "nonzero", "y": "nonzero"}, n=2)
+    A("scalar", cos(atan2(y, x)), x / sqrt(x**2 + y**2), why="polar angle", symbols={"x": "nonzero", "y": "nonzero"}, n=2, proof="atan2(y, x) is the polar angle of (x, y)")
+    A("scalar", acos(x) + asin(x), pi / 2, why="complementary angles", symbols={"x": {"between": ["-1", "1"]}}, n=2, proof="arccos x = pi/2 - arcsin x on [-1, 1]")
+    A("scalar", atan(x) + atan(1 / x), pi / 2, why="x is positive", symbols={"x": "positive"}, n=2, proof="arctan(1/x) = pi/2 - arctan x for x > 0")
+    D("scalar", atan(x) + atan(1 / x), pi / 2, why="minus pi/2 for negative x", symbols={"x": "nonzero"}, n=2)
+    A("scalar", 2 * acos(sqrt((1 + x) / 2)), acos(x), why="half angle of an arccosine", symbols={"x": {"between": ["-1", "1"]}}, n=2, proof="with x = cos u, u in [0, pi]: sqrt((1 + x)/2) = cos(u/2), whose arccosine is u/2")
+    A("scalar", acosh(x), ln(x + sqrt(x**2 - 1)), why="x above 1", symbols={"x": {"between": ["1", "5"]}}, n=2, proof="DLMF 4.37.19 for x >= 1")
+    A("scalar", atanh(x), half() * ln((1 + x) / (1 - x)), why="x between -1 and 1", symbols={"x": {"between": ["-1", "1"]}}, n=2, proof="DLMF 4.37.24")
+    return t
+
+
+def near_misses():
+    t = Topic("scalar-near-miss", "near")
+    x, th = syms("x theta")
+    real = {"x": "real", "theta": "real"}
+    r2 = 1 / sqrt(2)
+    A, D = t.agree, t.differ
+    A("scalar", r2, sqrt(2) / 2, 2 ** (-half()) if False else q(2) ** (-half()), sqrt(half()), cos(pi / 4), sin(pi / 4), sqrt(q(1, 2)), why="the same number", n=3)
+    for text in ("0.7071", "0.70710678", "0.707", "0.707106781", "0.71", "0.70710678118654752"):
+        D("scalar", r2, lit(text), why="a rounded decimal", slips=["rounded-decimal"])
+    for ref, texts in ((pi / 4, ("0.785", "0.7854", "0.785398163")), (sqrt(3) / 2, ("0.866", "0.8660254")), (q(1, 3), ("0.333", "0.33333333")), (q(2, 3), ("0.667", "0.6667")), (sqrt(5) / 3, ("0.745", "0.7454")), ((2 + sqrt(2)) / 4, ("0.854", "0.85355")), (cos(pi / 8) ** 2, ("0.8536",))):
+        for text in texts:
+            D("scalar", ref, lit(text), why="a rounded decimal", slips=["rounded-decimal"])
+    for ref, texts in ((pi, ("3.2", "3.1417", "3.14160")), (r2, ("0.708", "0.7072")), (sqrt(3) / 2, ("0.867",)), (q(1, 3), ("0.3", "0.34"))):
+        for text in texts:
+            if ref.k == "div" or text not in ("3.14160",):
+                D("scalar", ref, lit(text), why="a decimal that is not the rounded value", quiet=True) if text not in ("0.3",) else D("scalar", ref, lit(text), why="a decimal of one figure", slips=["rounded-decimal"])
+    D("scalar", pi, q(355, 113), q(22, 7), why="a fraction close to pi", n=2)
+    D("scalar", pi, sqrt(q(10)), why="close to pi", n=2)
+    D("scalar", q(262537412640768744), exp(pi * sqrt(163)), why="almost an integer: the difference is 7.5e-13", n=3)
+    D("scalar", exp(pi * sqrt(163)), q(262537412640768744), why="almost an integer: the difference is 7.5e-13")
+    D("scalar", q(10), 10 * tanh(28 * pi / 15), why="almost 10", n=2)
+    D("scalar", q(1), tanh(q(40)), why="one minus 3.6e-35", n=2)
+    D("scalar", x, x + lit("1e-12"), x * lit("1.000000000001"), x + lit("0.000000000001"), why="off by 1e-12", symbols=real)
+    D("scalar", x, x + lit("1e-30"), why="off by 1e-30", symbols=real)
+    D("scalar", cos(th), cos(th + lit("1e-12")), cos(th) + lit("1e-15"), why="off by 1e-12 or less", symbols=real)
+    D("scalar", half() * hbar, lit("0.5000000001") * hbar, lit("0.49999999999") * hbar, why="almost one half")
+    D("scalar", sqrt(2) + sqrt(3), pi, q(31462643699, 10**10), why="near sqrt 2 + sqrt 3", quiet=True, modes=("ascii",))
+    D("scalar", sin(q(11)), q(-1), why="11 is close to 7 pi/2: the sine is -0.99999", quiet=True)
+    D("scalar", cos(q(22)), q(-1), why="22 is close to 7 pi", quiet=True)
+    D("scalar", ln(q(2)), lit("0.693"), lit("0.6931"), why="a rounded decimal", slips=["rounded-decimal"])
+    A("scalar", half() * hbar, lit("0.5") * hbar, hbar * lit("0.50"), why="a terminating decimal is exact", n=2)
+    A("scalar", q(3, 4), lit("0.75"), lit("0.7500"), lit("7.5e-1"), why="a terminating decimal is exact", n=1)
+    A("scalar", q(1, 8), lit("0.125"), lit("1.25e-1"), why="a terminating decimal is exact")
+    A("scalar", q(3, 2), lit("1.5"), raw("1½", q(3, 2)), raw("1 + 1/2", q(3, 2)), raw("\\frac32", q(3, 2)), raw("6/4", q(3, 2)), why="three halves")
+    A("scalar", q(2, 1000), raw("2×10^-3", q(2, 1000)), raw("2\\cdot10^{-3}", q(2, 1000)), raw("2e-3", q(2, 1000)), raw("0.002", q(2, 1000)), raw("2 \\times 10^{-3}", q(2, 1000)), raw("2*10^(-3)", q(2, 1000)), raw("1/500", q(2, 1000)), why="scientific notation")
+    A("scalar", pi / 4, 4 * atan(q(1, 5)) - atan(q(1, 239)), atan(q(1, 2)) + atan(q(1, 3)), why="Machin and Euler", n=2, proof="Machin 1706; (2+i)(3+i) = 5+5i")
+    A("scalar", sqrt(2 + sqrt(3)), (sqrt(6) + sqrt(2)) / 2, why="a nested root", n=3)
+    A("scalar", sqrt(5 + 2 * sqrt(6)), sqrt(2) + sqrt(3), why="a nested root", n=3)
+    A("scalar", sqrt(3 - 2 * sqrt(2)), sqrt(2) - 1, why="a nested root", n=3)
+    D("scalar", sqrt(3 - 2 * sqrt(2)), 1 - sqrt(2), why="the negative root", n=2)
+    A("scalar", cos(pi / 12), (sqrt(6) + sqrt(2)) / 4, sqrt(2 + sqrt(3)) / 2, why="fifteen degrees", n=3)
+    A("scalar", cos(pi / 8), sqrt(2 + sqrt(2)) / 2, half() * sqrt(2 + sqrt(2)), sqrt((1 + cos(pi / 4)) / 2), why="22.5 degrees", n=3)
+    A("scalar", cos(pi / 5), (1 + sqrt(5)) / 4, why="36 degrees", n=3)
+    A("scalar", cos(pi / 8) ** 2, (2 + sqrt(2)) / 4, half() + sqrt(2) / 4, half() * (1 + 1 / sqrt(2)), why="22.5 degrees, squared", n=3)
+    A("scalar", sin(pi / 3), sqrt(3) / 2, cos(pi / 6), why="sixty degrees", n=3)
+    A("scalar", tan(pi / 12), 2 - sqrt(3), why="fifteen degrees", n=2)
+    A("scalar", 1 / (sqrt(3) + 1), (sqrt(3) - 1) / 2, why="rationalised", n=3)
+    A("scalar", (1 + i) / (1 - i), i, why="complex quotient", n=3)
+    A("scalar", (2 + 3 * i) * (1 - 2 * i), 8 - i, why="complex product", n=2)
+    A("scalar", i**3, -i, 1 / i, why="power of i", n=2)
+    A("scalar", sqrt(q(-1)), i, why="principal root", n=1)
+    A("scalar", sqrt(q(-4)), 2 * i, why="principal root", n=1)
+    A("scalar", exp(i * pi / 3), half() + i * sqrt(3) / 2, (1 + i * sqrt(3)) / 2, why="sixty degrees", n=3)
+    D("scalar", (1 + i) / (1 - i), -i, q(1), why="conjugated, or i lost", n=2)
+    D("scalar", sqrt(5 + 2 * sqrt(6)), sqrt(5) + sqrt(2 * sqrt(6)), why="root of a sum term by term", n=2)
+    D("scalar", cos(pi / 8), sqrt(2 + sqrt(2)), sqrt(2 - sqrt(2)) / 2, why="a factor two, or the sine", n=2)
+    D("scalar", cos(pi / 8) ** 2, (2 - sqrt(2)) / 4, why="the other probability", slips=["sine-cosine"], n=3)
+    D("scalar", cos(pi / 12), (sqrt(6) - sqrt(2)) / 4, why="the sine", slips=["sine-cosine"], n=2)
+    return t
+
+
+def topics():
+    return [domains(), near_misses()]
