@@ -2,8 +2,9 @@ import { beforeAll, describe, expect, it } from 'vitest';
 import { database } from '@/lib/db/connection';
 import { constraintNames, violatedConstraint } from '@/lib/db/constraints';
 import { checkConstraintNames, firstColumn, uniqueIndexNames } from './catalog';
+import { repetitions } from './repetitions';
 import { buildSpecimens } from './specimens';
-import { checkViolations, uniqueViolations, type Patch } from './violations';
+import { checkViolations, type Patch } from './violations';
 
 /** Unique pairs that contain the primary key: they exist to be pointed at, and cannot be repeated by themselves. */
 const targetOfForeignKey = /_id_(answer|course|draw|grader|user)_unique$/;
@@ -47,7 +48,7 @@ describe('check constraints', () => {
 });
 
 describe('unique constraints', () => {
-  const cases = Object.entries(uniqueViolations).flatMap(([table, byName]) =>
+  const cases = Object.entries(repetitions).flatMap(([table, byName]) =>
     Object.entries(byName).map(([constraint, patch]) => ({ table, constraint, patch })),
   );
   /** Which row is repeated, where the first will not do. */
@@ -62,7 +63,7 @@ describe('unique constraints', () => {
   });
 
   it('are all tried, but for those that only serve as targets', async () => {
-    const tried = Object.values(uniqueViolations).flatMap((byName) => Object.keys(byName));
+    const tried = Object.values(repetitions).flatMap((byName) => Object.keys(byName));
     const all = await uniqueIndexNames(database());
     expect([...tried, 'extensions_section_unique'].sort()).toEqual(
       all.filter((name) => !targetOfForeignKey.test(name)).sort(),
