@@ -31,7 +31,7 @@ const limiters = new WeakMap<Sequelize, Map<AttemptKind, RateLimiterPostgres>>()
  */
 export async function countAttempt(kind: AttemptKind, key: string): Promise<CountedAttempt> {
   const limiter = limiterOf(kind);
-  const stored = createHash('sha256').update(key).digest('hex');
+  const stored = storedKey(key);
   try {
     await limiter.consume(stored);
     return {
@@ -46,6 +46,15 @@ export async function countAttempt(kind: AttemptKind, key: string): Promise<Coun
     }
     throw refusal;
   }
+}
+
+/** Forgets what was counted against a key: a person who has just set a new password begins anew. */
+export async function forgetAttempts(kind: AttemptKind, key: string): Promise<void> {
+  await limiterOf(kind).delete(storedKey(key));
+}
+
+function storedKey(key: string): string {
+  return createHash('sha256').update(key).digest('hex');
 }
 
 function limiterOf(kind: AttemptKind): RateLimiterPostgres {
