@@ -10,10 +10,9 @@ from collections import Counter
 import mpmath
 
 import label
-from label import agree_at, environment, numeric
+from label import numeric
 from slips import value_slips
-from tree import N, walk
-from values import Points, evaluate
+from tree import walk
 from writer import Writer
 
 MODES = ("ascii", "uni", "tex", "mix")
@@ -25,10 +24,9 @@ class Topic:
 
     def __init__(self, name, prefix, symbols=None):
         self.name, self.prefix, self.symbols = name, prefix, symbols or {}
-        self.lines = {"agrees": [], "differs": [], "undecided": []}
+        self.lines = {"agrees": [], "differs": [], "undecided": [], "unreadable": []}
         self.seen = set()
         self.doubts = []
-        self.rng = random.Random(zlib.crc32(name.encode()))
 
     # --- the three kinds of line --------------------------------------------------------------------------------------
 
@@ -85,40 +83,36 @@ class Topic:
             return given
         if ref.k == "raw":
             return ref.a[0]
-        return Writer("ascii", random.Random(7), euler="e" not in self.symbols).text(ref, kind)
+        writer = Writer("ascii", random.Random(7), euler="e" not in self.symbols)
+        writer.labels = False
+        return writer.text(ref, kind)
 
     def spell(self, ans, kind, n, loose, modes, wild):
         if ans.k == "raw":
             return [ans.a[0]]
         out = []
-        start = self.rng.randrange(len(modes))
+        plain = Writer("ascii", random.Random(7)).text(ans, kind)
+        rng = random.Random(zlib.crc32(f"{self.name} {kind} {plain}".encode()))
+        start = rng.randrange(len(modes))
         for k in range(n * 3):
             mode = modes[(start + k) % len(modes)]
-            writer = Writer(mode, self.rng, loose=loose and self.rng.random() < 0.5, euler="e" not in self.symbols)
+            writer = Writer(mode, rng, loose=loose and rng.random() < 0.5, euler="e" not in self.symbols)
             text = writer.text(ans, kind)
             if mode == "tex":
-                text = self.decorate(text, kind)
+                text = decorate(text, rng)
             if text not in out:
                 out.append(text)
             if len(out) == n:
                 break
         return out
 
-    def decorate(self, text, kind):
-        """Now and then the signs people put around mathematics."""
-        r = self.rng.random()
-        if r < 0.12 and "=" not in text:
-            return f"${text}$"
-        if r < 0.17:
-            return text + "."
-        return text
-
     def add(self, verdict, kind, reference, answer, symbols, options, why, source, slips=None, pair=None, exactly=False, allowed=None, form=None):
         key = (kind, reference, answer, json.dumps(options, sort_keys=True), json.dumps(symbols, sort_keys=True))
         if key in self.seen:
             return
         self.seen.add(key)
-        line = {"id": "", "kind": kind, "reference": reference, "answer": answer, "symbols": symbols}
+        name = {"agrees": "agree", "differs": "differ", "undecided": "open", "unreadable": "unread"}[verdict]
+        line = {"id": f"{self.prefix}-{name}-{zlib.crc32(repr(key).encode()):08x}", "kind": kind, "reference": reference, "answer": answer, "symbols": symbols}
         if options:
             line["options"] = options
         line["verdict"] = verdict
@@ -135,14 +129,14 @@ class Topic:
         self.doubts.append(f"{self.name}: wanted {wanted} {kind}: {show(ref)}  |  {show(ans)}: {reason} {shown(witness) if witness else ''}")
 
     def write(self):
-        """Writes the topic's files with running ids and returns how many lines each verdict has."""
+        """Writes the topic's files and returns how many lines each verdict has."""
         for verdict, lines in self.lines.items():
             path = os.path.join(FOLDER, "equivalence", verdict, f"{self.name}.jsonl")
             if not lines:
                 continue
+            os.makedirs(os.path.dirname(path), exist_ok=True)
             with open(path, "w", encoding="utf-8") as f:
-                for k, line in enumerate(lines, 1):
-                    line["id"] = f"{self.prefix}-{verdict[:-1] if verdict != 'undecided' else 'open'}-{k:04d}"
+                for line in lines:
                     f.write(json.dumps(line, ensure_ascii=False) + "\n")
         return Counter({v: len(lines) for v, lines in self.lines.items()})
 
@@ -157,6 +151,14 @@ ORDER = (
 def in_order(slips):
     """Slips in the order of the catalogue."""
     return sorted(slips, key=ORDER.index)
+
+
+def decorate(text, rng):
+    """Now and then the signs people put around mathematics."""
+    r = rng.random()
+    if r < 0.12 and "=" not in text:
+        return f"${text}$"
+    return text + "." if r < 0.17 else text
 
 
 def shown(witness):

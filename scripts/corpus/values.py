@@ -30,6 +30,8 @@ class Points:
     def sqrt(self, x):
         return mpmath.sqrt(x)
 
+    even_root = sqrt
+
     def tidy(self, x):
         return mpmath.mpf(0) if abs(x) < mpmath.mpf(10) ** -70 else x
 
@@ -54,6 +56,10 @@ class Exact:
 
     def sqrt(self, x):
         return sympy.sqrt(sympy.factor(x))
+
+    def even_root(self, x):
+        """Either square root: for even functions only."""
+        return sympy.powdenest(sympy.sqrt(sympy.factor(x)), force=True)
 
     def tidy(self, x):
         return sympy.simplify(x)
@@ -220,7 +226,7 @@ def exponential(x, b):
     (p, r), (s, t) = x[1]
     a0 = (p + t) / 2
     d = [[p - a0, r], [s, t - a0]]
-    root = b.sqrt(b.tidy(d[0][0] ** 2 + r * s))
+    root = b.even_root(b.tidy(d[0][0] ** 2 + r * s))
     ratio = b.fn("sinh", [root]) / root if b.tidy(root) != 0 else b.num(Fraction(1))
     c = b.fn("cosh", [root])
     e = b.fn("exp", [a0])

@@ -33,6 +33,7 @@ class Writer:
         self.tight = rng.random() < 0.5
         self.stars = rng.random() < 0.6
         self.state = False
+        self.labels = True
 
     def text(self, n, kind="scalar"):
         """The whole answer."""
@@ -126,7 +127,7 @@ class Writer:
 
     def w_div(self, n, tail):
         top, bottom = n.a
-        if self.m() == "tex" and self.chance(0.9) and not has_state(n):
+        if self.m() == "tex" and self.chance(0.9) and not any(p.k in ("ket", "bra", "col", "mat") for p in walk(n)):
             return T(f"{self.one(chr(92) + 'frac', chr(92) + 'frac', chr(92) + 'dfrac', chr(92) + 'tfrac')}{{{self.w(top).s}}}{{{self.w(bottom).s}}}", MUL)
         a = self.w(top, False)
         if a.p < MUL or a.tail:
@@ -162,7 +163,7 @@ class Writer:
         if before.k == "bra" or after.k == "bra" or (after.k == "ket" and before.k == "op"):
             return ""
         signs = {"ascii": ["*"], "uni": ["·"], "tex": [r" \cdot ", r"\,"] if not slash else [r" \cdot "]}
-        if before.k not in STATES and after.k not in STATES and before.k not in OPERATORS and after.k not in OPERATORS and not r[0].isdigit():
+        if not (has_state(before) or has_state(after) or r[0].isdigit()):
             signs = {**signs, "uni": ["·", "×"], "tex": signs["tex"] + [r" \times "]}
         sign = self.one(*signs[self.m()])
         if sign == "\\," and (r[0].isdigit() or r[0] in ".½¼¾⅓⅔"):
@@ -331,7 +332,7 @@ class Writer:
     def w_set(self, n, tail):
         a, b = (self.w(x).s for x in n.a)
         forms = [f"{{{a}, {b}}}", f"{a}, {b}"] if self.m() != "tex" else [rf"\{{{a}, {b}\}}", f"{a}, {b}", rf"\left\{{{a}, {b}\right\}}"]
-        if self.chance(0.2):
+        if self.labels and self.chance(0.2):
             forms = [f"E_+ = {a}, E_- = {b}"]
         return T(self.one(*forms), 0)
 
@@ -357,12 +358,13 @@ class Writer:
         return T(rf"\left({body}\right)" if self.m() == "tex" and self.chance(0.5) else f"({body})")
 
 
-STATES = {"ket", "bra", "col"}
+STATES = {"ket", "bra", "col", "raw"}
 OPERATORS = {"op", "mat", "comm", "acomm", "dag", "inv", "transpose"}
 
 
 def has_state(n):
-    return any(p.k in STATES | {"mat"} for p in walk(n))
+    """Whether a subtree holds an operator, a matrix or a state."""
+    return any(p.k in STATES | OPERATORS for p in walk(n))
 
 
 def word(s, end):
