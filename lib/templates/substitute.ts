@@ -83,5 +83,5 @@ export function substitute(tree: Expression, replacements: Replacements): Expres
 function replaced(symbol: Extract<Expression, { node: 'symbol' }>, replacements: Replacements): Expression {
   const replacement = replacements.get(symbol.name);
   if (replacement === undefined) return symbol;
-  return { node: 'group', type: replacement.type, span: symbol.span, body: replacement };
+  return { node: 'group', bracket: '(', type: replacement.type, span: symbol.span, body: replacement };
 }
