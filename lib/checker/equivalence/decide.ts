@@ -1,0 +1,151 @@
+import { type Graph, type Node } from '../algebra/graph';
+import { highPrecisionDifference } from './high-precision';
+import { type ModularOutcome, modularTest } from './modular';
+import { type NumericPoint } from './numeric';
+import { type Proof } from './proof';
+import { type SamplePoints } from './sample-points';
+import { type Pair } from './size-bound';
+import { sameByExponential } from './exponential-test';
+
+/**
+ * Whether two sides are the same at every point of the domain where both are defined. `equal` rests on an exact
+ * argument, `different` on a witness point; everything else is undecided.
+ */
+export type Decision =
+  | {
+      readonly status: 'equal';
+      readonly test: 'normal form' | 'modular' | 'modular and numeric';
+      readonly proof: Proof;
+    }
+  | { readonly status: 'different'; readonly point: NumericPoint; readonly pair: number; readonly precise: boolean }
+  | { readonly status: 'undecided'; readonly reason: string };
+
+const FIRST_POINTS = 2;
+const SEARCH_POINTS = 48;
+/** A difference this many times its error bound is beyond rounding. */
+const MARGIN = 4;
+
+export function decideEqual(g: Graph, pairs: readonly Pair[], points: SamplePoints, seed: number): Decision {
+  const open = pairs.filter(([x, y]) => x !== y);
+  if (open.length === 0) {
+    return { status: 'equal', test: 'normal form', proof: { bound: 0, fields: 0, degree: 0, branches: 1, points: 0 } };
+  }
+  const search = new Search(pairs, points);
+  const early = search.upTo(FIRST_POINTS, 8);
+  if (early) return early;
+  const outcome = modularTest(g, open, seed);
+  if (outcome.status === 'zero') {
+    if (search.usable === 0 && !search.upTo(1, SEARCH_POINTS) && search.usable === 0) {
+      return { status: 'undecided', reason: 'no point was found at which both sides are defined' };
+    }
+    return { status: 'equal', test: 'modular', proof: { ...proofOf(outcome), points: search.usable } };
+  }
+  const found = search.upTo(SEARCH_POINTS, SEARCH_POINTS);
+  if (found) return found;
+  if (outcome.status === 'branches') return settleBranches(open, outcome, points, search.usable);
+  for (let k = 0, tried = 0; k < SEARCH_POINTS && tried < 2; k++) {
+    const point = points.at(k);
+    if (!point) continue;
+    tried++;
+    for (let j = 0; j < pairs.length; j++) {
+      const [x, y] = pairs[j]!;
+      if (x !== y && highPrecisionDifference(point, x, y))
+        return { status: 'different', point, pair: j, precise: true };
+    }
+  }
+  const exponential = sameByExponential(g, open, points, seed);
+  if (exponential && search.usable > 0) {
+    return { status: 'equal', test: 'modular and numeric', proof: { ...exponential, points: search.usable } };
+  }
+  const reason =
+    outcome.status === 'failed' ? outcome.reason : 'the exact test and the numeric values do not settle it';
+  return { status: 'undecided', reason };
+}
+
+const proofOf = (o: Extract<ModularOutcome, { bound: number }>): Omit<Proof, 'points'> => ({
+  bound: o.bound,
+  fields: o.fields,
+  degree: o.degree,
+  branches: o.status === 'zero' ? o.branches : 2 ** o.kernels.length,
+});
+
+/** Looks for a point at which a pair differs beyond rounding, remembering how far it has looked. */
+class Search {
+  private next = 0;
+  usable = 0;
+
+  constructor(
+    private readonly pairs: readonly Pair[],
+    private readonly points: SamplePoints,
+  ) {}
+
+  /** Looks until `wanted` usable points were seen or `limit` were drawn. */
+  upTo(wanted: number, limit: number): Extract<Decision, { status: 'different' }> | null {
+    for (; this.next < limit && this.usable < wanted; this.next++) {
+      const point = this.points.at(this.next);
+      if (!point) continue;
+      const pair = differingPair(this.pairs, point);
+      if (pair === 'unknown') continue;
+      this.usable++;
+      if (pair !== null) return { status: 'different', point, pair, precise: false };
+    }
+    return null;
+  }
+}
+
+/** The first pair that differs beyond rounding at a point; null if none; `unknown` where a value is not defined there. */
+export function differingPair(pairs: readonly Pair[], point: NumericPoint): number | null | 'unknown' {
+  let last = 0;
+  for (const [x, y] of pairs) last = Math.max(last, x, y);
+  point.evaluate(last);
+  for (const [x, y] of pairs) if (!point.isKnown(x) || !point.isKnown(y)) return 'unknown';
+  for (let k = 0; k < pairs.length; k++) {
+    const [x, y] = pairs[k]!;
+    if (x !== y && differsAt(point, x, y)) return k;
+  }
+  return null;
+}
+
+export function differsAt(point: NumericPoint, x: Node, y: Node): boolean {
+  const distance = Math.abs(point.re[x]! - point.re[y]!) + Math.abs(point.im[x]! - point.im[y]!);
+  return distance > MARGIN * (point.error[x]! + point.error[y]!);
+}
+
+/**
+ * The two sides agree on some branches of the roots. At each point the branches that vanish there are counted: where
+ * they are as many as vanish identically, they are those, and the principal branch must be one of them.
+ */
+function settleBranches(
+  pairs: readonly Pair[],
+  outcome: Extract<ModularOutcome, { status: 'branches' }>,
+  points: SamplePoints,
+  usable: number,
+): Decision {
+  let settled = 0;
+  const patterns = 2 ** outcome.kernels.length;
+  for (let k = 0; k < SEARCH_POINTS; k++) {
+    const point = points.at(k);
+    if (!point) continue;
+    const principal = differingPair(pairs, point);
+    if (principal === 'unknown') continue;
+    let vanishing = 0;
+    let clear = true;
+    for (let pattern = 0; pattern < patterns && clear; pattern++) {
+      const branch = onBranch(point, new Set(outcome.kernels.filter((_, j) => (pattern >> j) & 1)));
+      const differs = differingPair(pairs, branch);
+      if (differs === 'unknown') clear = false;
+      else if (differs === null) vanishing++;
+    }
+    if (clear && vanishing === outcome.vanishing) settled++;
+  }
+  if (settled >= SEARCH_POINTS / 3) {
+    return { status: 'equal', test: 'modular and numeric', proof: { ...proofOf(outcome), points: usable } };
+  }
+  return { status: 'undecided', reason: 'the branches of the roots could not be told apart' };
+}
+
+function onBranch(point: NumericPoint, flipped: ReadonlySet<Node>): NumericPoint {
+  const branch = point.copy();
+  branch.flipped = flipped;
+  return branch;
+}
