@@ -7,8 +7,7 @@
 const secretName =
   /pass(word|phrase)?|secret|token|authorization|cookie|credential|hash$|api.?key|answer|raw|reading|prompt|comment|reason|payload|body|e.?mail|(^|_)name$|fullName|parameters|bind|sql|detail/i;
 
-/** Names that match the rule by accident and hold nothing but an identifier or a count. */
-const harmless = /(^id|Ids?|_ids?|Count|count|Kind|kind)$/;
+const rowId = /^[0-9a-f]{8}-([0-9a-f]{4}-){3}[0-9a-f]{12}$/i;
 
 const deepest = 6;
 const longestText = 500;
@@ -24,12 +23,18 @@ export function scrub(value: unknown, depth = 0): unknown {
   if (depth >= deepest) return '[deep]';
   if (Array.isArray(value)) return value.slice(0, longestList).map((entry) => scrub(entry, depth + 1));
   return Object.fromEntries(
-    Object.entries(value).map(([name, entry]) => [name, isSecret(name) ? '[left out]' : scrub(entry, depth + 1)]),
+    Object.entries(value).map(([name, entry]) => [
+      name,
+      isSecret(name, entry) ? '[left out]' : scrub(entry, depth + 1),
+    ]),
   );
 }
 
-function isSecret(name: string): boolean {
-  return secretName.test(name) && !harmless.test(name);
+/** Numbers, truth values and the ids of rows tell nothing, whatever they are called. */
+function isSecret(name: string, value: unknown): boolean {
+  if (!secretName.test(name) || value === null || value === undefined) return false;
+  if (typeof value === 'number' || typeof value === 'boolean') return false;
+  return !(typeof value === 'string' && rowId.test(value));
 }
 
 /** What a log says of an error. */

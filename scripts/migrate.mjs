@@ -12,7 +12,7 @@ import { takeLock } from './ground/run-lock.mjs';
 import { readSettings } from './ground/settings.mjs';
 import { shutDownInOrder } from './ground/shut-down.mjs';
 
-const end = shutDownInOrder();
+const end = shutDownInOrder({ codeAfterSignal: 130 });
 const say = (line) => console.log(line);
 
 try {

@@ -4,13 +4,16 @@ import { report } from './failure.mjs';
 /**
  * The order in which everything ends: helpers that are only preparing, then services in the order they were started
  * (the web server before the worker that serves it), then the database, then the lock. Signals start it; it runs once.
+ *
+ * @param {{ codeAfterSignal?: number }} options the exit code where a signal was the reason
  */
-export function shutDownInOrder() {
+export function shutDownInOrder({ codeAfterSignal = 0 } = {}) {
   const first = [];
   const last = [];
   const helpers = new Set();
   let ending = null;
   let exitCode = 0;
+  let closing = null;
 
   const end = async () => {
     for (const helper of helpers) helper.kill('SIGTERM');
@@ -22,6 +25,7 @@ export function shutDownInOrder() {
         report(new Error(`The ${name} did not stop cleanly.`, { cause: error }));
       }
     }
+    if (closing !== null) quietly(() => console.log(closing));
     process.exit(exitCode);
   };
   const now = (code) => {
@@ -32,11 +36,11 @@ export function shutDownInOrder() {
 
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
     process.on(signal, () => {
-      if (ending === null) quietly(() => console.log('\nStopping Halfmark …'));
-      void now(0);
+      if (ending === null) quietly(() => console.log('\nStopping …'));
+      void now(codeAfterSignal);
     });
   }
-  endWithNpm(() => void now(0));
+  endWithNpm(() => void now(codeAfterSignal));
   // A closed terminal or pipe must not keep us from stopping what we started.
   for (const stream of [process.stdout, process.stderr]) stream.on('error', () => {});
   process.on('uncaughtException', (error) => {
@@ -55,6 +59,10 @@ export function shutDownInOrder() {
     watchHelper(child) {
       helpers.add(child);
       child.once('close', () => helpers.delete(child));
+    },
+    /** Printed when all has ended, as the very last line. */
+    lastWords(line) {
+      closing = line;
     },
     removeFile: (file) => rmSync(file, { force: true }),
   };

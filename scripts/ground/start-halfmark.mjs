@@ -13,7 +13,7 @@ import { keepRunning } from './services.mjs';
 import { readSettings } from './settings.mjs';
 import { demoAccounts, hasDemo, isEmpty } from './demo.mjs';
 import { readyText } from './ready-text.mjs';
-import { serviceList } from './service-list.mjs';
+import { httpAddress, sinkService, webService, workerService } from './service-list.mjs';
 import { shutDownInOrder } from './shut-down.mjs';
 
 const usualPort = 3420;
@@ -49,22 +49,19 @@ async function bringUp(settings, end) {
   await ensurePackages(say, end.watchHelper);
   goOn();
 
-  const keys = secrets();
-  const appUrl =
-    settings.appUrl ?? `http://${settings.host.includes(':') ? `[${settings.host}]` : settings.host}:${port}`;
-  const ports = await sinkPorts(settings);
-  const shared = {
-    appUrl,
-    sessionSecret: process.env.NEXTAUTH_SECRET || keys.sessionSecret,
-    smtpUrl: settings.smtpUrl ?? `smtp://127.0.0.1:${ports.smtp}`,
-  };
+  const facts = await serviceFacts(settings, port);
   // The build needs no database, so both are made at once; where one fails the other is ended.
   const building = ensureBuild(say, { onStart: end.watchHelper });
-  const prepared = prepareDatabase(settings, shared, say, end, goOn);
+  const prepared = prepareDatabase(settings, facts, say, end, goOn);
   const [database] = await Promise.all([prepared, building]);
   goOn();
 
-  const services = serviceList({ settings, ...shared, databaseUrl: database.url, port, ports });
+  const complete = { ...facts, databaseUrl: database.url };
+  const services = [
+    ...(facts.sink ? [sinkService(complete)] : []),
+    webService(complete),
+    ...Array.from({ length: settings.workers }, (_, index) => workerService(complete, index + 1)),
+  ];
   const listener = { say, giveUp: (error) => void fail(error, end) };
   for (const service of services) {
     const { stop } = await keepRunning(service, listener);
@@ -73,21 +70,21 @@ async function bringUp(settings, end) {
     goOn();
   }
   return {
-    url: appUrl,
+    url: facts.appUrl,
     text: (seconds) =>
       readyText({
-        url: appUrl,
+        url: facts.appUrl,
         seconds,
         accounts: database.showsDemo ? demoAccounts() : null,
-        mailUrl: settings.smtpUrl === null ? `http://127.0.0.1:${ports.mailPage}` : null,
+        mailUrl: facts.sink ? httpAddress('127.0.0.1', facts.sink.mailPage) : null,
         dataFolder: database.folder,
-        logFolder: inState('log'),
+        logFolder: facts.logFolder,
       }),
   };
 }
 
 /** The database, up to date and (where it is ours alone and empty) with the demo in it. */
-async function prepareDatabase(settings, shared, say, end, goOn) {
+async function prepareDatabase(settings, facts, say, end, goOn) {
   if (settings.databaseUrl !== null) {
     await requireMigrated(settings.databaseUrl, end.watchHelper);
     return { url: settings.databaseUrl, folder: null, showsDemo: false };
@@ -105,7 +102,7 @@ async function prepareDatabase(settings, shared, say, end, goOn) {
   }
   await migrate(own.url, end.watchHelper);
   goOn();
-  await seedOnce(own, shared, say, end);
+  await seedOnce(own, facts, say, end);
   return { url: own.url, folder, showsDemo: await withClient(own.url, hasDemo) };
 }
 
@@ -113,7 +110,7 @@ async function prepareDatabase(settings, shared, say, end, goOn) {
  * Seeds an empty database. A seeding cut short left a database that nobody has used, since the web server starts only
  * afterwards: it is made again.
  */
-async function seedOnce(own, { appUrl, sessionSecret, smtpUrl }, say, end) {
+async function seedOnce(own, { appUrl, sessionSecret, smtpUrl, uploadsFolder }, say, end) {
   const marker = inState('seeding.json');
   if (existsSync(marker) && readJson(marker)?.home === own.home) {
     await own.recreate();
@@ -121,16 +118,29 @@ async function seedOnce(own, { appUrl, sessionSecret, smtpUrl }, say, end) {
   } else if (!(await withClient(own.url, isEmpty))) return;
   say('Putting the demo into the database …');
   writeJson(marker, { home: own.home });
-  await seed(own.url, appUrl, { NEXTAUTH_SECRET: sessionSecret, SMTP_URL: smtpUrl, ...uploads() }, end.watchHelper);
+  const env = { NEXTAUTH_SECRET: sessionSecret, SMTP_URL: smtpUrl, UPLOADS_DIR: uploadsFolder };
+  await seed(own.url, appUrl, env, end.watchHelper);
   end.removeFile(marker);
 }
 
-function uploads() {
-  return process.env.UPLOADS_DIR ? {} : { UPLOADS_DIR: `${projectRoot}/uploads` };
+/** @returns {Promise<import('./service-list.mjs').ServiceFacts>} all but the database */
+async function serviceFacts(settings, port) {
+  const sink = settings.smtpUrl === null ? await sinkPorts() : null;
+  return {
+    baseEnv: process.env,
+    host: settings.host,
+    port,
+    appUrl: settings.appUrl ?? httpAddress(settings.host, port),
+    sessionSecret: process.env.NEXTAUTH_SECRET || secrets().sessionSecret,
+    smtpUrl: settings.smtpUrl ?? `smtp://127.0.0.1:${sink.smtp}`,
+    sink,
+    mailFolder: inState('mail'),
+    uploadsFolder: process.env.UPLOADS_DIR || `${projectRoot}/uploads`,
+    logFolder: inState('log'),
+  };
 }
 
-async function sinkPorts(settings) {
-  if (settings.smtpUrl !== null) return { smtp: null, mailPage: null };
+async function sinkPorts() {
   const file = inState('ports.json');
   const kept = readJson(file, {});
   const ports = { smtp: await freePort(kept?.smtp), mailPage: await freePort(kept?.mailPage) };

@@ -20,7 +20,11 @@ export function testServerUrl(): string {
 
 /** Makes a migrated database that nobody else uses, as a copy of a template made once for these migrations. */
 export async function createTestDatabase(): Promise<string> {
-  const template = await migratedTemplate();
+  return copyDatabase(await migratedTemplate());
+}
+
+/** Makes a database that nobody else uses, as a copy of another to which nobody is connected. */
+export async function copyDatabase(template: string): Promise<string> {
   const name = newName();
   await onServer((server) => server.query(`create database ${name} template ${template}`));
   return urlOf(name);
@@ -75,7 +79,8 @@ async function fingerprint(): Promise<string> {
   return hash.digest('hex').slice(0, 12);
 }
 
-async function onServer<Result>(work: (server: pg.Client) => Promise<Result>): Promise<Result> {
+/** Runs statements on the server itself, in a session of their own. */
+export async function onServer<Result>(work: (server: pg.Client) => Promise<Result>): Promise<Result> {
   const server = new pg.Client({ connectionString: testServerUrl() });
   await server.connect();
   try {
