@@ -19,7 +19,7 @@ export default async function SignInPage({ searchParams }: Props) {
       <RunningHead place="Sign in" />
       <ScriptPage>
         <Section margin={<Help />}>
-          <PageTitle>Sign in</PageTitle>
+          <PageTitle kicker="Homework on two-level systems, checked and marked">Sign in</PageTitle>
           {set === 'yes' ? <p className="mb-4">Your password is set. Sign in with it.</p> : null}
           <SignInForm next={target} />
         </Section>

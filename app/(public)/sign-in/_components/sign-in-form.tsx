@@ -15,34 +15,19 @@ const words: Record<Exclude<SignInResult, 'welcome'>, string> = {
   failed: 'Signing in did not work just now. Please try again.',
 };
 
-type State = { email: string; result: SignInResult | null };
-
-/** E-mail and password. A refusal keeps the e-mail and never says which of the two was wrong. */
+/** E-mail and password. A refusal keeps what was typed and never says which of the two was wrong. */
 export function SignInForm({ next }: { next: string }) {
-  const [state, send] = useActionState(
-    async (_before: State, form: FormData): Promise<State> => {
-      const email = text(form, 'email');
-      const result = await signInAndWait(email, text(form, 'password'));
-      // A whole navigation, so that nothing rendered for a signed-out visitor is shown again.
-      if (result === 'welcome') window.location.assign(next);
-      return { email, result };
-    },
-    { email: '', result: null },
-  );
-  const { email, result } = state;
+  const [result, send] = useActionState(async (_before: SignInResult | null, form: FormData): Promise<SignInResult> => {
+    const result = await signInAndWait(text(form, 'email'), text(form, 'password'));
+    // A whole navigation, so that nothing rendered for a signed-out visitor is shown again.
+    if (result === 'welcome') window.location.assign(next);
+    return result;
+  }, null);
   const faults: FieldErrors = result === null || result === 'welcome' ? {} : { '': words[result] };
   return (
-    <form action={send} className="grid gap-4">
+    <form action={send} onReset={(event) => event.preventDefault()} className="grid gap-4">
       <FormErrorSummary errors={faults} title="You are not signed in" />
-      <Field
-        name="email"
-        label="E-mail"
-        type="email"
-        autoComplete="username"
-        key={`email ${email}`}
-        defaultValue={email}
-        maxLength={254}
-      />
+      <Field name="email" label="E-mail" type="email" autoComplete="username" maxLength={254} />
       <Field name="password" label="Password" type="password" autoComplete="current-password" maxLength={1000} />
       <div className="flex flex-wrap items-center gap-x-6 gap-y-3">
         <SubmitButton pendingWords="Signing in">Sign in</SubmitButton>
