@@ -87,8 +87,8 @@ export async function startHalfmark({
         await new Promise((resolve) => setTimeout(resolve, 100));
       }
     },
-    killWorkers: services.killWorkers,
-    startWorker: services.startWorker,
+    killWorkers: (signal) => services.killWorkers(signal),
+    startWorker: () => services.startWorker(),
     async stop() {
       await services.stop();
       await clear();

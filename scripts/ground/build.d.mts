@@ -1,0 +1,1 @@
+export function hashOf(root: string, names: string[]): string;
