@@ -169,9 +169,9 @@ def shown(witness):
 
 
 def digits(v):
-    if isinstance(v, tuple):
+    if isinstance(v, tuple) and isinstance(v[0], str):
         return "(" + ", ".join(digits(x) for x in v[1]) + ")"
-    if isinstance(v, list):
+    if isinstance(v, (tuple, list)):
         return "[" + ", ".join(digits(x) for x in v) + "]"
     return mpmath.nstr(mpmath.chop(mpmath.mpc(v), 1e-30), 15).replace("(", "").replace(")", "")
 

@@ -51,7 +51,12 @@ export async function runTests(names) {
     end.last('folder of this run', () => rmSync(folder, { recursive: true, force: true }));
     const provide = provider(say, end);
     for (const { name, needs } of wanted) {
-      const env = { ...kept(process.env), NEXT_TELEMETRY_DISABLED: '1', HALFMARK_TEST_FOLDER: folder };
+      const env = {
+        ...kept(process.env),
+        NEXT_TELEMETRY_DISABLED: '1',
+        HALFMARK_TEST_FOLDER: folder,
+        LOG_LEVEL: 'silent',
+      };
       for (const need of needs) Object.assign(env, await provide(need));
       if (end.isEnding()) return;
       counts.push(await runStage(name, path.join(folder, `${name}.json`), env, end));

@@ -19,7 +19,7 @@ export async function planForTest(folder) {
   for (const name of ['mail', 'uploads', 'log']) mkdirSync(path.join(folder, name), { recursive: true, mode: 0o700 });
   const [port, smtp, mailPage] = [await freePort(), await freePort(), await freePort()];
   return {
-    baseEnv: process.env,
+    baseEnv: { ...process.env, LOG_LEVEL: 'info' },
     host: '127.0.0.1',
     port,
     appUrl: httpAddress('127.0.0.1', port),
