@@ -1,4 +1,5 @@
 import { renderInlineMarkdown, renderMarkdown } from '@/lib/markdown';
+import { ScrollReach } from './scroll-reach';
 import './typeset.css';
 
 export interface MarkdownProps {
@@ -12,6 +13,8 @@ export function Markdown({ source, inline = false }: MarkdownProps) {
   return inline ? (
     <span dangerouslySetInnerHTML={{ __html: renderInlineMarkdown(source) }} />
   ) : (
-    <div className="prose" dangerouslySetInnerHTML={{ __html: renderMarkdown(source) }} />
+    <ScrollReach>
+      <div className="prose" dangerouslySetInnerHTML={{ __html: renderMarkdown(source) }} />
+    </ScrollReach>
   );
 }

@@ -2,6 +2,7 @@
 
 import { lazy, Suspense } from 'react';
 import { refusedTex } from '@/lib/tex-guard';
+import { ScrollReach } from './scroll-reach';
 import './typeset.css';
 
 const BlockMath = lazy(async () => ({ default: (await import('react-katex')).BlockMath }));
@@ -20,12 +21,20 @@ export function TypesetLive({ latex, plain, display = false }: TypesetLiveProps)
   const words = <code>{plain}</code>;
   if (refusedTex(latex) !== null) return words;
   const Formula = display ? BlockMath : InlineMath;
-  const Frame = display ? 'div' : 'span';
-  return (
-    <Frame role="img" aria-label={plain} className={display ? 'typeset-display' : undefined}>
-      <Suspense fallback={words}>
-        <Formula math={latex} renderError={() => words} />
-      </Suspense>
-    </Frame>
+  const formula = (
+    <Suspense fallback={words}>
+      <Formula math={latex} renderError={() => words} />
+    </Suspense>
+  );
+  return display ? (
+    <ScrollReach>
+      <div role="img" aria-label={plain} className="typeset-display">
+        {formula}
+      </div>
+    </ScrollReach>
+  ) : (
+    <span role="img" aria-label={plain}>
+      {formula}
+    </span>
   );
 }

@@ -1,4 +1,5 @@
 import { typeset } from '@/lib/typeset';
+import { ScrollReach } from './scroll-reach';
 import './typeset.css';
 
 export interface TypesetProps {
@@ -24,5 +25,11 @@ export function Typeset({ latex, plain, display = false }: TypesetProps) {
   ) : (
     picture
   );
-  return display ? <span className="typeset-display">{named}</span> : named;
+  return display ? (
+    <ScrollReach inline>
+      <span className="typeset-display">{named}</span>
+    </ScrollReach>
+  ) : (
+    named
+  );
 }

@@ -4,14 +4,14 @@ import type { ButtonHTMLAttributes, ReactNode } from 'react';
 export type ButtonLook = 'primary' | 'quiet' | 'danger' | 'plain';
 
 const shape =
-  'inline-flex min-h-10 items-center justify-center gap-2 rounded-leaf border px-4 py-1.5 text-base leading-snug font-semibold no-underline';
+  'no-print inline-flex min-h-10 items-center justify-center gap-2 rounded-leaf border px-4 py-1.5 text-base leading-snug font-semibold no-underline';
 
 const looks: Record<ButtonLook, string> = {
   primary: `${shape} border-blue bg-blue text-on-blue hover:border-ink`,
   quiet: `${shape} border-blue bg-transparent text-blue hover:bg-wash`,
   danger: `${shape} border-madder bg-transparent text-madder hover:bg-madder hover:text-on-madder`,
   plain:
-    'inline min-h-6 border-0 bg-transparent p-0 text-blue underline decoration-1 underline-offset-[0.22em] hover:decoration-2',
+    'no-print inline min-h-6 border-0 bg-transparent p-0 text-blue underline decoration-1 underline-offset-[0.22em] hover:decoration-2',
 };
 
 const disabledLook =

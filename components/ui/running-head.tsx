@@ -58,7 +58,7 @@ export function RunningHead({ steps = [], place, status, nav = [], account, home
         <div className="text-small text-grey sm:text-end">{status}</div>
       </div>
       {nav.length > 0 || account ? (
-        <div className="flex flex-wrap items-baseline justify-between gap-x-8 gap-y-1 pb-2 text-small">
+        <div className="no-print flex flex-wrap items-baseline justify-between gap-x-8 gap-y-1 pb-2 text-small">
           <NavLine items={nav} label="Pages" />
           {account ? <div className="text-grey">{account}</div> : null}
         </div>
