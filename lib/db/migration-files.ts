@@ -11,7 +11,7 @@ export function migrationsFolder(): string {
 
 /** The names of all migrations there are, oldest first. Throws when a file in the folder is not named as one. */
 export async function migrationNames(folder: string = migrationsFolder()): Promise<string[]> {
-  const names = (await readdir(folder)).filter((name) => name.endsWith('.ts')).sort();
+  const names = (await readdir(/* turbopackIgnore: true */ folder)).filter((name) => name.endsWith('.ts')).sort();
   const odd = names.find((name) => !fileName.test(name));
   if (odd !== undefined) throw new Error(`migrations/${odd} is not named YYYYMMDDHHMMSS-verb-object.ts.`);
   return names;

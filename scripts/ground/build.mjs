@@ -2,7 +2,7 @@ import { createHash } from 'node:crypto';
 import { existsSync, readdirSync, readFileSync, statSync } from 'node:fs';
 import path from 'node:path';
 import { Failure, lastWords } from './failure.mjs';
-import { readJson, writeJson } from './files.mjs';
+import { readJson, writeJson, writeWhole } from './files.mjs';
 import { inState, makeStateFolder, projectRoot } from './folders.mjs';
 import { sleep } from './processes.mjs';
 import { run } from './programs.mjs';
@@ -68,15 +68,14 @@ export async function ensureBuild(say, { onStart, mayReplace = () => null } = {}
     const hash = hashOf(projectRoot, sources);
     const { code, output } = await run(process.execPath, ['node_modules/next/dist/bin/next', 'build'], {
       cwd: projectRoot,
-      env: { ...process.env, NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1' },
+      env: { ...process.env, NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1', NO_COLOR: '1' },
       onStart,
     });
     if (code !== 0) {
       if (/ENOSPC|No space left/i.test(output)) throw Object.assign(new Error('No space left'), { code: 'ENOSPC' });
-      throw new Failure(
-        `The pages could not be built: ${lastWords(output, 1_500)}`,
-        'Mend the source named there and start again.',
-      );
+      const log = inState('log', 'build.log');
+      writeWhole(log, output);
+      throw new Failure(`The pages could not be built: ${firstError(output)}`, `All of it is in ${log}`);
     }
     writeJson(stampFile(), { sources: hash }, 0o644);
   } finally {
@@ -92,6 +91,12 @@ export function servingFromHere(startLock) {
     `Halfmark is running from this folder (process ${holder.pid}) with a build of older sources, which may not be replaced under it.`,
     'Stop it (Ctrl-C where it was started) and try again.',
   );
+}
+
+/** The first line of a build's output that speaks of an error, or its last words. */
+export function firstError(output) {
+  const line = output.split('\n').find((one) => /error/i.test(one) && !/warning/i.test(one));
+  return line?.trim().slice(0, 400) ?? lastWords(output);
 }
 
 async function waitForLock(file) {

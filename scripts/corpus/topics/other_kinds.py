@@ -89,7 +89,7 @@ def eigenpairs():
     sp_, sm_ = col(cos(th / 2), exp(i * ph) * sin(th / 2)), col(sin(th / 2), -(exp(i * ph) * cos(th / 2)))
     A(K, pairs(q(1), sp_, q(-1), sm_), pairs(q(1), col(exp(-(i * ph / 2)) * cos(th / 2), exp(i * ph / 2) * sin(th / 2)), q(-1), col(-(exp(-(i * ph / 2)) * sin(th / 2)), exp(i * ph / 2) * cos(th / 2))), pairs(q(1), col(1 + cos(th), exp(i * ph) * sin(th)), q(-1), col(1 - cos(th), -(exp(i * ph) * sin(th)))), pairs(q(-1), col(-(exp(-(i * ph)) * sin(th / 2)), cos(th / 2)), q(1), sp_), why="spin along a direction", n=3)
     A(K, pairs(q(4), col(2, 1 + 2 * i) if False else col(1 - 2 * i, 1), q(-2), col(1, -(1 + 2 * i))), pairs(q(4), col(5, 1 + 2 * i), q(-2), col(-1, 1 + 2 * i)), pairs(q(-2), col(1 - 2 * i, -5), q(4), col(1 - 2 * i, 1)), why="[[3, 1-2i], [1+2i, -1]]", n=3)
-    A(K, pairs(q(3), col(1, 1), q(3), col(1, -1)), pairs(q(3), P, q(3), M), pairs(q(3), col(1, 2), q(3), col(i, 1)), why="degenerate: any two independent states", n=3)
+    A(K, pairs(q(3), col(1, 1), q(3), col(1, -1)), pairs(q(3), P, q(3), M), pairs(q(3), col(1, 2), q(3), col(i, 1)), why="degenerate: any two independent states", n=3, proof="two independent states span the plane")
     D(K, pairs(q(3), P, q(3), M), pairs(q(3), P, q(3), 2 * P), pairs(q(3), P, q(2), M), pairs(q(3), P + M, q(3), -P - M), why="degenerate, but the states do not span, or a value is wrong", n=2, quiet=True)
     unit = {"requireNormalised": True}
     A(K, pairs(h, ket("+x"), -h, ket("-x")), pairs(h, (P + M) / sqrt(2), -h, (M - P) / sqrt(2)), pairs(-h, i * col(1, -1) / sqrt(2), h, col(1, 1) / sqrt(2)), why="normalised", options=unit, n=3)
