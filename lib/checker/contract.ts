@@ -103,6 +103,7 @@ export interface Evidence {
 export type Property = 'yes' | 'no' | 'undecided';
 
 export type EvidenceTest =
+  | 'normal form'
   | 'modular'
   | 'modular and numeric'
   | 'witness'

@@ -154,11 +154,14 @@ const table: Record<ReferenceName, ReferenceFunction> = {
   variance: scalarOf((c, a, state) => variance(c, asOperator(c.g, a!), state!)),
   /** √(variance). */
   uncertainty: scalarOf((c, a, state) => squareRoot(c.g, variance(c, asOperator(c.g, a!), state!))),
-  /** |⟨φ|ψ⟩|² of normalised states (Born 1926). */
-  probability: scalarOf((c, phi, psi) => {
-    const [x, y] = [asKet(phi!), asKet(psi!)];
-    for (const state of [x, y]) requireUnit(c, operators.normSquared(c.g, state), 'a state is not normalised');
-    return absoluteSquare(c.g, operators.contract(c.g, operators.conjugateComponents(c.g, x), y));
+  /** |⟨φ|ψ⟩|² of normalised states, or ⟨φ|ρ|φ⟩ (Born 1926). */
+  probability: scalarOf((c, phi, state) => {
+    const { g } = c;
+    const x = asKet(phi!);
+    requireUnit(c, operators.normSquared(g, x), 'the state is not normalised');
+    if (state!.type !== 'ket') return expectation(c, densityOf(c, state!), phi!);
+    requireUnit(c, operators.normSquared(g, state!.components), 'the state is not normalised');
+    return absoluteSquare(g, operators.contract(g, operators.conjugateComponents(g, x), state!.components));
   }),
   /** |ψ⟩⟨ψ|/⟨ψ|ψ⟩. */
   projector: operatorOf(({ g }, psi) => {

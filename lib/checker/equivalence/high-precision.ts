@@ -84,7 +84,10 @@ class HighPrecision {
       }
       case Op.Symbol: {
         const solution = g.solved.get(a);
-        return solution === undefined ? complex(new D(this.values[a]!)) : this.value(solution);
+        const given = complex(new D(this.values[a]!));
+        if (solution === undefined) return given;
+        const root = this.value(solution);
+        return root && times(given, root);
       }
       case Op.I:
         return { re: ZERO_REAL, im: new D(1) };

@@ -18,7 +18,7 @@ export class NumericPoint {
 
   constructor(
     readonly graph: Graph,
-    /** Value of each variable, by index. */
+    /** Value of each variable, by index; the sign of one that an assumption determines up to its sign. */
     readonly values: Float64Array,
   ) {}
 
@@ -55,7 +55,7 @@ export class NumericPoint {
       case Op.Symbol: {
         const solution = g.solved.get(a);
         if (solution === undefined) this.set(node, this.values[a]!, 0, 0);
-        else this.set(node, this.re[solution]!, 0, this.error[solution]!);
+        else this.set(node, this.values[a]! * this.re[solution]!, 0, this.error[solution]!);
         return;
       }
       case Op.I:

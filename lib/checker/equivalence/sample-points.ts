@@ -38,14 +38,19 @@ export class SamplePoints {
     for (let attempt = 0; attempt < TRIES; attempt++) {
       const variables = this.graph.variables;
       const values = new Float64Array(variables.length);
-      for (let v = 0; v < variables.length; v++) values[v] = this.value(variables[v]!, v, k);
+      // Points that fail are drawn again closer to the origin: an assumption often bounds a sum of squares.
+      const shrink = this.requirements.length === 0 ? 1 : 0.85 ** attempt;
+      for (let v = 0; v < variables.length; v++) {
+        const free = !this.graph.solved.has(v);
+        values[v] = free ? this.value(variables[v]!, v, k, shrink) : this.signOf(variables[v]!);
+      }
       const point = new NumericPoint(this.graph, values);
       if (this.admits(point)) return point;
     }
     return null;
   }
 
-  private value(variable: Variable, v: number, k: number): number {
+  private value(variable: Variable, v: number, k: number, shrink: number): number {
     const unit = this.random.unit();
     const wide = k >= 6 && k % 3 === 2;
     if (variable.domain === 'between' && Number.isFinite(variable.low) && Number.isFinite(variable.high)) {
@@ -58,11 +63,17 @@ export class SamplePoints {
     const landmark = k >= 6 && k % 3 === 1 ? this.landmark(k, v) : 0;
     if (landmark > 0) size = landmark * (0.7 + 0.1 * unit + (this.random.next() & 1 ? 0.6 : 0));
     else size *= scale;
+    if (variable.name !== 'hbar') size *= shrink;
     const low = Number.isFinite(variable.low) ? variable.low : null;
     const high = Number.isFinite(variable.high) ? variable.high : null;
     if (variable.domain === 'between') return low !== null ? low + size : high !== null ? high - size : size;
     const signed = variable.domain === 'real' || variable.domain === 'nonzero';
     return signed && this.random.next() & 1 ? -size : size;
+  }
+
+  /** Sign of a variable that an assumption determines up to its sign. */
+  private signOf(variable: Variable): number {
+    return variable.domain === 'real' && this.random.next() & 1 ? -1 : 1;
   }
 
   /** A number of the expressions away from 1, so that later points lie on both sides of it; 0 if there is none. */
