@@ -9,7 +9,7 @@ import { paths } from '@/lib/paths';
 export type SitePlace = 'courses' | 'work' | 'templates' | 'reading' | 'admin' | null;
 
 /** The pages of one course. */
-export type CoursePlace = 'sets' | 'roster' | 'tokens' | 'log' | null;
+export type CoursePlace = 'sets' | 'templates' | 'roster' | 'tokens' | 'log' | null;
 
 /** Where this person can go outside any course; only what is open to them. */
 export function siteNav(actor: PersonActor, here: SitePlace): NavItem[] {
@@ -31,6 +31,7 @@ export function courseNav(actor: PersonActor, course: CourseForPolicy, here: Cou
   const may = (ability: Parameters<typeof decide>[1]) => decide(actor, ability, course).allowed;
   return [
     may('read-course-templates') && { place: 'sets', label: 'Sets', href: paths.course(course.id) },
+    may('read-course-templates') && { place: 'templates', label: 'Templates', href: paths.templates() },
     may('read-roster') && { place: 'roster', label: 'Roster', href: paths.roster(course.id) },
     may('manage-tokens') && { place: 'tokens', label: 'Tokens', href: paths.tokens(course.id) },
     may('read-audit-log') && { place: 'log', label: 'Log', href: paths.log(course.id) },
