@@ -1,5 +1,6 @@
 import net from 'node:net';
 import { Failure } from './failure.mjs';
+import { waitUntil } from './processes.mjs';
 
 /** Whether a program can listen at this address now; the error's code where it cannot. */
 export function tryToListen(port, host = '127.0.0.1') {
@@ -28,10 +29,11 @@ export async function freePort(preferred = 0) {
  *
  * @param {string | undefined} declared PORT as set by the person, who then gets that port or a message
  * @param {number} preferred tried first where nothing was declared
+ * @param {number} patienceMs how long a taken port is waited for
  */
-export async function webPort(declared, host, preferred) {
+export async function webPort(declared, host, preferred, patienceMs = 0) {
   if (declared === undefined || declared === '') {
-    const wish = await tryToListen(preferred, host);
+    const wish = await listenPatiently(preferred, host, patienceMs);
     if (typeof wish === 'number') return wish;
     const other = await tryToListen(0, host);
     if (typeof other === 'number') return other;
@@ -39,7 +41,7 @@ export async function webPort(declared, host, preferred) {
   }
   const port = readPort(declared);
   if (port === null) throw new Failure(`PORT is "${declared}".`, 'Set it to a whole number from 1 to 65535.');
-  const answer = await tryToListen(port, host);
+  const answer = await listenPatiently(port, host, patienceMs);
   if (answer === port) return port;
   if (answer === 'EADDRINUSE') {
     throw new Failure(
@@ -54,6 +56,19 @@ export async function webPort(declared, host, preferred) {
     `Nothing can listen at ${host}:${port} (${answer}).`,
     'Set HOST to an address of this machine and PORT to a free port.',
   );
+}
+
+async function listenPatiently(port, host, patienceMs) {
+  let answer = null;
+  await waitUntil(
+    async () => {
+      answer = await tryToListen(port, host);
+      return answer !== 'EADDRINUSE';
+    },
+    patienceMs,
+    250,
+  );
+  return answer;
 }
 
 /** A port number from text, or null. */

@@ -8,18 +8,20 @@ import { isAlive, sleep, startTicks } from './processes.mjs';
  * id now belongs to another program) is cleared.
  *
  * @param {string} file
- * @returns {Promise<{ note(more: object): void, release(): void } | { holder: Record<string, unknown> }>}
+ * @returns {Promise<{ note(more: object): void, release(): void, tookOver: boolean } |
+ *   { holder: Record<string, unknown> }>} `tookOver`: the last holder ended without letting go
  */
 export async function takeLock(file) {
   const mine = { pid: process.pid, startTicks: startTicks(process.pid), since: new Date().toISOString() };
   const draft = `${file}.${process.pid}.new`;
+  let tookOver = false;
   for (let attempt = 0; attempt < 20; attempt += 1) {
     writeJson(draft, mine);
     try {
       // A link appears whole or not at all, and never replaces another.
       linkSync(draft, file);
       unlinkSync(draft);
-      return held(file, mine);
+      return { ...held(file, mine), tookOver };
     } catch (error) {
       rmSync(draft, { force: true });
       if (error.code !== 'EEXIST') throw error;
@@ -27,6 +29,7 @@ export async function takeLock(file) {
     const holder = readJson(file);
     if (holder !== null && holds(holder)) return { holder };
     clearStale(file);
+    tookOver = true;
     await sleep(20 + Math.random() * 60);
   }
   throw new Failure(`The lock ${file} cannot be taken.`, 'Delete that file and start again.');

@@ -17,6 +17,7 @@ import { httpAddress, sinkService, webService, workerService } from './service-l
 import { shutDownInOrder } from './shut-down.mjs';
 
 const usualPort = 3420;
+const longestFarewellMs = 15_000;
 const leastFreeBytes = { firstStart: 2_000_000_000, laterStart: 200_000_000 };
 
 /** Runs Halfmark until a signal ends it or something fails; sets the exit code. */
@@ -30,7 +31,7 @@ export async function startHalfmark() {
     const lock = await takeLock(inState('running.json'));
     if ('holder' in lock) throw alreadyRunning(lock.holder);
     end.last('lock', () => lock.release());
-    const { text, url } = await bringUp(settings, end);
+    const { text, url } = await bringUp(settings, end, lock.tookOver);
     lock.note({ url });
     console.log(text(Math.round((performance.now() - began) / 1000)));
   } catch (error) {
@@ -39,13 +40,15 @@ export async function startHalfmark() {
   }
 }
 
-async function bringUp(settings, end) {
+async function bringUp(settings, end, tookOver) {
   const say = (line) => end.isEnding() || console.log(line);
   const goOn = () => {
     if (end.isEnding()) throw new Failure('Halfmark was asked to stop.', '');
   };
   requireDisk();
-  const port = await webPort(settings.port, settings.host, usualPort);
+  // The web server of a killed start takes a few seconds to notice and to give its port back.
+  const patience = tookOver ? longestFarewellMs : 0;
+  const port = await webPort(settings.port, settings.host, usualPort, patience);
   await ensurePackages(say, end.watchHelper);
   goOn();
 
