@@ -1,23 +1,12 @@
 /** Whole answers: what each kind reads to, the conditions of templates, and what reading depends on. */
+import { type AnswerKind, type SymbolTable } from '../contract';
 import { type Diagnostic, type Span } from '../diagnostics';
 import { type Expression } from './tree';
 
-/** What an answer is asked to be. */
-export type AnswerKind =
-  'scalar' | 'quantity' | 'operator' | 'pauli' | 'eigenvalues' | 'state' | 'eigenpairs' | 'vector' | 'choice';
-
-/** The domain of a declared symbol; the ends of `between` are expressions in the answer language. */
-export type Domain =
-  | 'real'
-  | 'positive'
-  | 'nonnegative'
-  | 'nonzero'
-  | 'integer'
-  | 'complex'
-  | { readonly between: readonly [string, string] };
+export type { AnswerKind };
 
 /** Declared names and their domains. The keys are the canonical names that symbol nodes carry. */
-export type Symbols = Readonly<Record<string, Domain>>;
+export type Symbols = SymbolTable;
 
 /** A label such as `E_+` or `λ_{1,2}`; it is shown back and otherwise ignored. */
 export interface Label {
@@ -124,8 +113,8 @@ export interface ParseResult {
   /** Whether people commonly read this text in another way too. */
   readonly ambiguous: boolean;
   /**
-   * The other common readings, structurally different from `tree` and from each other; empty unless ambiguous.
-   * Computed when called, at most fifteen.
+   * The other common readings, structurally different from `tree` and from each other; empty unless ambiguous, at most
+   * fifteen.
    */
-  readonly alternatives: () => readonly AnswerTree[];
+  readonly alternatives: readonly AnswerTree[];
 }

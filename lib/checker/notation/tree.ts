@@ -65,6 +65,8 @@ export interface SymbolNode extends Base {
 /** Brackets that only group, kept so that the reading shows what was typed. Same type as the body. */
 export interface GroupNode extends Base {
   readonly node: 'group';
+  /** `(` where absent. */
+  readonly bracket?: '(' | '[' | '{';
   readonly body: Expression;
 }
 
@@ -213,6 +215,8 @@ export interface MatrixNode extends Base {
 export interface ColumnNode extends Base {
   readonly node: 'column';
   readonly type: 'ket';
+  /** Whether it was written side by side, as `(a, b)`, `[a, b]` or `[a, b]^T`. */
+  readonly inline?: boolean;
   readonly entries: readonly [Expression, Expression];
 }
 

@@ -1,0 +1,168 @@
+/** Pairing of the bars that are no part of a ket or bra. */
+import { type Diagnostic } from '../diagnostics';
+import { maximumDepth } from './limits';
+import { endsOperand, startsOperand } from './starts';
+import { type Token } from './token';
+
+/**
+ * Turns every bar into an opening or a closing one, in place. Bars pair inside one bracket and one entry. Where two
+ * pairings are possible, or none, that is the problem returned. Linear in the number of tokens.
+ */
+export function pairBars(tokens: readonly Token[]): Diagnostic | null {
+  if (!tokens.some(({ kind }) => kind === 'bar')) return null;
+  const levels: number[][] = [[]];
+  const resolve = (): Diagnostic | null => {
+    const bars = levels[levels.length - 1] ?? [];
+    levels[levels.length - 1] = [];
+    return bars.length === 0 ? null : pair(tokens, bars);
+  };
+  for (let index = 0; index < tokens.length; index += 1) {
+    const token = tokens[index];
+    let problem: Diagnostic | null = null;
+    switch (token?.kind) {
+      case 'bar':
+        levels[levels.length - 1]?.push(index);
+        break;
+      case '(':
+      case '[':
+      case '{':
+      case 'begin':
+      case 'bar-open':
+        levels.push([]);
+        break;
+      case ')':
+      case ']':
+      case '}':
+      case 'end-environment':
+      case 'bar-close':
+        problem = resolve();
+        if (levels.length > 1) levels.pop();
+        break;
+      case ',':
+      case ';':
+      case ':':
+      case '=':
+      case '!=':
+      case '<':
+      case '<=':
+      case '>':
+      case '>=':
+      case '&':
+      case 'row':
+      case 'and':
+      case 'or':
+      case 'not':
+      case 'end':
+        problem = resolve();
+        break;
+    }
+    if (problem) return problem;
+  }
+  for (const bars of levels) {
+    const problem = bars.length === 0 ? null : pair(tokens, bars);
+    if (problem) return problem;
+  }
+  return null;
+}
+
+/**
+ * Counts the pairings, up to two. A bar can close after an operand and open before one; an opening bar directly before a
+ * closing one would hold nothing.
+ */
+function pair(tokens: readonly Token[], bars: readonly number[]): Diagnostic | null {
+  const count = bars.length;
+  if (count % 2 === 1) return unpaired(tokens, bars);
+  const deepest = Math.min(count / 2, maximumDepth);
+  const width = (deepest + 1) * 2;
+  /** ways[bar][depth][whether the bar before opened], at most 2 each. */
+  const ways = new Uint8Array((count + 1) * width);
+  ways[count * width] = 1;
+  ways[count * width + 1] = 1;
+  for (let bar = count - 1; bar >= 0; bar -= 1) {
+    for (let depth = 0; depth <= deepest; depth += 1) {
+      for (let opened = 0; opened <= 1; opened += 1) {
+        const open = mayOpen(tokens, bars, bar, depth, deepest)
+          ? (ways[(bar + 1) * width + (depth + 1) * 2 + 1] ?? 0)
+          : 0;
+        const close = mayClose(tokens, bars, bar, depth, opened === 1)
+          ? (ways[(bar + 1) * width + (depth - 1) * 2] ?? 0)
+          : 0;
+        ways[bar * width + depth * 2 + opened] = Math.min(2, open + close);
+      }
+    }
+  }
+  if (ways[0] === 0) return unpaired(tokens, bars);
+  if (ways[0] === 2) {
+    const message = 'These bars can be paired in two ways.';
+    return { code: 'bars', span: spanOf(tokens, bars), message, hint: 'Write abs( ) for absolute values.' };
+  }
+  let depth = 0;
+  for (let bar = 0; bar < count; bar += 1) {
+    const token = tokens[bars[bar] ?? 0];
+    const open = mayOpen(tokens, bars, bar, depth, deepest) && (ways[(bar + 1) * width + (depth + 1) * 2 + 1] ?? 0) > 0;
+    if (token) token.kind = open ? 'bar-open' : 'bar-close';
+    depth += open ? 1 : -1;
+  }
+  return null;
+}
+
+function mayOpen(
+  tokens: readonly Token[],
+  bars: readonly number[],
+  bar: number,
+  depth: number,
+  deepest: number,
+): boolean {
+  if (depth >= deepest) return false;
+  const next = tokens[(bars[bar] ?? 0) + 1];
+  if (next === undefined) return false;
+  return (
+    next.kind === 'bar' ||
+    startsOperand(next) ||
+    next.kind === '+' ||
+    next.kind === '-' ||
+    next.kind === '±' ||
+    next.kind === '∓'
+  );
+}
+
+function mayClose(
+  tokens: readonly Token[],
+  bars: readonly number[],
+  bar: number,
+  depth: number,
+  opened: boolean,
+): boolean {
+  if (depth === 0) return false;
+  const index = bars[bar] ?? 0;
+  const before = tokens[index - 1];
+  if (before?.kind === 'bar') return !opened;
+  if (before?.kind === '*' && tokens[index - 2]?.kind === '^') return true;
+  return endsOperand(before);
+}
+
+function unpaired(tokens: readonly Token[], bars: readonly number[]): Diagnostic {
+  for (const index of bars) {
+    const token = tokens[index];
+    const label = tokens[index + 1];
+    const after = tokens[index + 2];
+    if (token === undefined || label === undefined || after === undefined) continue;
+    if ((label.kind === '+' || label.kind === '-' || label.kind === 'arrow') && !startsOperand(after)) {
+      const span = { start: token.start, end: label.end };
+      return { code: 'ket-unclosed', span, message: 'This ket is not closed.', hint: `Write |${label.text}>.` };
+    }
+  }
+  const message = 'A bar here has no partner.';
+  return {
+    code: 'bars',
+    span: spanOf(tokens, bars),
+    message,
+    hint: 'A ket is written |+>, an absolute value abs( ) or | |.',
+  };
+}
+
+function spanOf(tokens: readonly Token[], bars: readonly number[]): { start: number; end: number } {
+  const first = tokens[bars[0] ?? 0];
+  const last = tokens[bars[bars.length - 1] ?? 0];
+  return { start: first?.start ?? 0, end: last?.end ?? 0 };
+}

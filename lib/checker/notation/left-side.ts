@@ -1,0 +1,85 @@
+/** The decoration `name =` before an answer, and the labels of values. */
+import { type Label } from './answer-tree';
+import { type Cursor } from './cursor';
+import { nesting } from './parse-product';
+import { type Token, type TokenKind } from './token';
+
+/** Positions of tokens of a kind in a range, outside brackets. */
+export function outsideBrackets(tokens: readonly Token[], from: number, to: number, kind: TokenKind): number[] {
+  const found: number[] = [];
+  let depth = 0;
+  for (let index = from; index < to; index += 1) {
+    const token = tokens[index];
+    if (token === undefined) break;
+    depth += nesting(token);
+    if (depth === 0 && token.kind === kind) found.push(index);
+  }
+  return found;
+}
+
+/** Where an expression in a range begins after `name =`, and the label if the name is one; reports what is no such thing. */
+export function passLeftSide(
+  cursor: Cursor,
+  from: number,
+  to: number,
+): { readonly from: number; readonly label: Label | null } {
+  const equals = outsideBrackets(cursor.tokens, from, to, '=');
+  const first = equals[0];
+  const second = equals[1];
+  if (first === undefined) return { from, label: null };
+  if (second !== undefined) {
+    const token = cursor.tokens[second];
+    if (token) cursor.fail('chain', token, 'There is more than one equals sign.', 'Give the final expression only.');
+    return { from, label: null };
+  }
+  if (!isLeftSide(cursor.tokens, from, first)) {
+    const start = cursor.tokens[from]?.start ?? 0;
+    const end = cursor.tokens[first]?.end ?? 0;
+    const message = 'Only a name can stand before an equals sign here.';
+    cursor.fail('left-side', { start, end }, message, 'Give the expression alone.');
+    return { from, label: null };
+  }
+  return { from: first + 1, label: labelOf(cursor.tokens, from, first) };
+}
+
+/** A name, a name with its arguments, a bracket such as `[S_x, S_y]`, a ket, or a mean value. */
+function isLeftSide(tokens: readonly Token[], from: number, to: number): boolean {
+  const first = tokens[from];
+  if (first === undefined || to <= from) return false;
+  let index = from;
+  if (isName(first)) {
+    index += 1;
+    while (index < to && isName(tokens[index]) && tokens[index]?.spaced === false) index += 1;
+    if (index === to) return true;
+    return tokens[index]?.kind === '(' && closesAt(tokens, index) === to - 1;
+  }
+  if (first.kind === 'ket' || first.kind === 'bra' || first.kind === 'named-ket') return to === from + 1;
+  if (first.kind === '<') return tokens[to - 1]?.kind === '>';
+  return nesting(first) > 0 && closesAt(tokens, from) === to - 1;
+}
+
+function isName(token: Token | undefined): boolean {
+  if (token?.kind === 'unknown') return true;
+  const is = token?.kind === 'word' ? token.meaning?.is : undefined;
+  return is === 'symbol' || is === 'operator' || is === 'constant' || is === 'identity';
+}
+
+/** The position of the bracket that closes the one at a position. */
+export function closesAt(tokens: readonly Token[], open: number): number {
+  let depth = 0;
+  for (let index = open; index < tokens.length; index += 1) {
+    const token = tokens[index];
+    if (token === undefined) break;
+    depth += nesting(token);
+    if (depth <= 0) return index;
+  }
+  return -1;
+}
+
+function labelOf(tokens: readonly Token[], from: number, to: number): Label | null {
+  const last = tokens[to - 1];
+  if (!isName(last) || last === undefined) return null;
+  let base = '';
+  for (let index = from; index < to; index += 1) base += tokens[index]?.text ?? '';
+  return { base, index: last.index };
+}

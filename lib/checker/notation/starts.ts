@@ -1,0 +1,55 @@
+/** Which tokens can begin or end an operand. */
+import { type Token } from './token';
+
+/** Whether an operand can begin with this token. */
+export function startsOperand(token: Token): boolean {
+  switch (token.kind) {
+    case 'number':
+    case 'vulgar':
+    case 'word':
+    case 'unknown':
+    case 'ket':
+    case 'bra':
+    case 'named-ket':
+    case 'bar-open':
+    case 'root':
+    case 'frac':
+    case 'overline':
+    case '(':
+    case '[':
+    case '{':
+    case '<':
+    case 'begin':
+      return true;
+    default:
+      return false;
+  }
+}
+
+/** Whether a token can be the last of an operand. */
+export function endsOperand(token: Token | undefined): boolean {
+  switch (token?.kind) {
+    case 'number':
+    case 'vulgar':
+    case 'word':
+    case 'unknown':
+    case 'superscript':
+    case 'subscript':
+    case 'ket':
+    case 'bra':
+    case 'named-ket':
+    case 'bar-close':
+    case 'dagger':
+    case 'transpose':
+    case 'prime':
+    case 'degree':
+    case 'end-environment':
+    case ')':
+    case ']':
+    case '}':
+    case '>':
+      return true;
+    default:
+      return false;
+  }
+}
