@@ -7,6 +7,10 @@ import { type ReadAnswer, type ReadingOf, type ReadingRequest, useReading } from
 
 export interface AnswerFieldProps extends ReadingRequest {
   readonly name: string;
+  /** When two fields of one page bear the same name. */
+  readonly id?: string;
+  /** The form it belongs to, where it does not stand inside it. */
+  readonly form?: string;
   /** Names the field: "Answer to part a". It is read out; the prompt beside the letter is what is seen. */
   readonly label: string;
   /** Below the field, in words. It never gives the form of the answer away. */
@@ -29,6 +33,8 @@ const announcePause = 900;
  */
 export function AnswerField({
   name,
+  id = fieldId(name),
+  form,
   label,
   hint,
   defaultValue = '',
@@ -40,7 +46,6 @@ export function AnswerField({
   symbols,
   options,
 }: AnswerFieldProps) {
-  const id = fieldId(name);
   const [text, setText] = useState(defaultValue);
   const reading = useReading(text, { kind, symbols, options }, read);
   const spoken = useAnnouncement(reading);
@@ -61,6 +66,7 @@ export function AnswerField({
       <textarea
         id={id}
         name={name}
+        form={form}
         rows={1}
         value={text}
         disabled={disabled}

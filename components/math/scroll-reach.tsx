@@ -22,7 +22,8 @@ export function ScrollReach({ inline = false, children }: { inline?: boolean; ch
     measure();
     const observer = new ResizeObserver(measure);
     observer.observe(element);
-    void document.fonts.ready.then(measure);
+    // Widths are final once the fonts are there; a DOM without a font set has no widths either.
+    void document.fonts?.ready.then(measure);
     return () => observer.disconnect();
   });
   const Frame = inline ? 'span' : 'div';

@@ -1,3 +1,5 @@
+import { errorTable } from '@/lib/errors';
+
 /** What the Origin check needs of a request; `Request` and `NextRequest` both fit. */
 export interface OriginRequest {
   readonly method: string;
@@ -25,7 +27,10 @@ export function checkOrigin(request: OriginRequest, appUrl = process.env.APP_URL
   if (!request.headers.get('cookie')) return allowed;
   const origin = parseUrl(request.headers.get('origin'));
   if (!origin) {
-    return { allowed: false, reason: 'The request changes something with a cookie but does not say where it came from.' };
+    return {
+      allowed: false,
+      reason: 'The request changes something with a cookie but does not say where it came from.',
+    };
   }
   const own = parseUrl(appUrl);
   if (own && origin.origin === own.origin) return allowed;
@@ -40,13 +45,14 @@ export function checkOrigin(request: OriginRequest, appUrl = process.env.APP_URL
 export function originRefusal(reason: string, requestId?: string): Response {
   const problem = {
     type: 'about:blank',
-    title: 'This request did not come from Halfmark',
-    status: 403,
+    title: errorTable['cross-origin'].message,
+    status: errorTable['cross-origin'].status,
+    code: 'cross-origin',
     detail: `${reason} Open the page again from the address you usually use and repeat the action.`,
     ...(requestId ? { requestId } : {}),
   };
   return new Response(JSON.stringify(problem), {
-    status: 403,
+    status: problem.status,
     headers: { 'content-type': 'application/problem+json', 'cache-control': 'no-store' },
   });
 }
