@@ -84,7 +84,10 @@ export function readWithValues(
 
 /** Reads a condition and puts the drawn values in the place of their names. */
 export function readCondition(text: string, ready: ReadyValues): ReadResult<Condition> {
-  const { tree, diagnostics } = parseCondition(withTexts(text, ready.texts), { symbols: ready.table });
+  const { tree, diagnostics } = parseCondition(withTexts(text, ready.texts), {
+    symbols: ready.table,
+    allowReferenceFunctions: true,
+  });
   if (tree === null) return { ok: false, error: firstFault(diagnostics) };
   return { ok: true, tree: mapCondition(tree, (operand) => substitute(operand, ready.scalars)) };
 }
