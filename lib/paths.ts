@@ -44,6 +44,7 @@ export const paths = {
   adminCourses: () => '/admin/courses',
   adminCourse: (courseId: string) => `/admin/courses/${courseId}`,
   adminAccounts: () => '/admin/accounts',
+  adminAccount: (userId: string) => `/admin/accounts/${userId}`,
   adminMail: () => '/admin/mail',
   adminLog: () => '/admin/log',
 } as const;

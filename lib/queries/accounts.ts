@@ -1,5 +1,6 @@
 import { QueryTypes } from 'sequelize';
 import { database } from '@/lib/db/connection';
+import { HalfmarkError } from '@/lib/errors';
 
 /** An account as the list of all accounts shows it. */
 export type AccountInList = {
@@ -14,17 +15,34 @@ export type AccountInList = {
 
 export const accountsPerPage = 50;
 
+const columns = `
+  u.id, u.name, u.email, u.is_administrator as "isAdministrator", u.password_hash is not null as "hasPassword",
+  u.deactivated_at is not null as "isDeactivated",
+  coalesce((select array_agg(c.code || ' (' || m.role || ')' order by c.code)
+              from memberships m join courses c on c.id = m.course_id
+             where m.user_id = u.id and m.left_at is null), '{}') as courses`;
+
+/**
+ * One account that is not erased.
+ *
+ * @throws HalfmarkError `not-found`
+ */
+export async function accountById(userId: string): Promise<AccountInList> {
+  const [account] = await database().query<AccountInList>(
+    `select ${columns} from users u where u.id = :userId and u.erased_at is null`,
+    { type: QueryTypes.SELECT, replacements: { userId } },
+  );
+  if (account === undefined) throw new HalfmarkError('not-found');
+  return account;
+}
+
 /** The accounts whose name or e-mail contains a text, by name, one page of them, and how many there are in all. */
 export async function accounts(input: {
   search: string;
   page: number;
 }): Promise<{ rows: AccountInList[]; total: number }> {
   const rows = await database().query<AccountInList & { total: number }>(
-    `select u.id, u.name, u.email, u.is_administrator as "isAdministrator", u.password_hash is not null as "hasPassword",
-            u.deactivated_at is not null as "isDeactivated", count(*) over ()::integer as total,
-            coalesce((select array_agg(c.code || ' (' || m.role || ')' order by c.code)
-                        from memberships m join courses c on c.id = m.course_id
-                       where m.user_id = u.id and m.left_at is null), '{}') as courses
+    `select ${columns}, count(*) over ()::integer as total
        from users u
       where u.erased_at is null and (strpos(lower(u.name), :search) > 0 or strpos(u.email, :search) > 0)
       order by u.name, u.id

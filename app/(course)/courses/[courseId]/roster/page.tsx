@@ -1,5 +1,6 @@
 import { CourseHead } from '@/app/_components/page-head';
 import { openCoursePage } from '@/app/_server/course-page';
+import { ButtonLink } from '@/components/ui/button';
 import { DefinitionList } from '@/components/ui/definition-list';
 import { MarginNote, PageTitle, ScriptPage, Section } from '@/components/ui/script-page';
 import { courseRoles } from '@/lib/domain/roles';
@@ -32,7 +33,16 @@ export default async function RosterPage({ params }: Props) {
             <div className="grid gap-5">
               <Sections sections={sections} />
               {bound === null ? null : <MarginNote>You see the students of the sections you grade.</MarginNote>}
-              {mayChange ? <SectionForm courseId={course.id} /> : null}
+              {mayChange ? (
+                <>
+                  <div>
+                    <ButtonLink look="primary" href="#bring-in">
+                      Bring a person in
+                    </ButtonLink>
+                  </div>
+                  <SectionForm courseId={course.id} />
+                </>
+              ) : null}
             </div>
           }
         >
@@ -41,6 +51,7 @@ export default async function RosterPage({ params }: Props) {
         </Section>
         {mayChange ? (
           <Section
+            id="bring-in"
             label="Bring a person in"
             margin={
               <MarginNote>
