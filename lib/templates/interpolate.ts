@@ -6,8 +6,12 @@ import { readValue } from './read-text';
 import { typesetFormula } from './typeset-formula';
 import { type TypesetValue } from './typeset-value';
 
-/** A formula in Markdown, between one or two dollar signs; a dollar after a backslash is only a dollar. */
-const formulaPattern = /(?<!\\)(\$\$?)((?:\\[\s\S]|[^\\$])+?)\1/g;
+/**
+ * A formula in Markdown: between two pairs of dollar signs, or between two single ones with no blank just inside them and
+ * no digit behind; a dollar after a backslash is only a dollar. The same rule as where Markdown is rendered.
+ */
+const formulaPattern =
+  /(?<!\\)(?:(\$\$)((?:\\[\s\S]|[^\\$])+)\$\$|(\$)(?![\s$])((?:\\[\s\S]|[^\\$])+)(?<!\s)\$(?!\d))/g;
 
 /**
  * Sets drawn values into a Markdown text: `{{n}}` in prose becomes a formula of its own, and within a formula the value
@@ -29,9 +33,11 @@ export function interpolate(
   let result = '';
   let at = 0;
   for (const match of text.matchAll(formulaPattern)) {
-    const [whole, dollars = '$', formula = ''] = match;
+    const [whole, pair, display = '', single, inline = ''] = match;
+    const dollars = pair ?? single ?? '';
     result += inProse(text.slice(at, match.index), valueOf);
-    result += dollars + typesetFormula(formula, valueOf) + dollars;
+    // A value that falls away may leave a blank inside the dollar, which would then be none.
+    result += dollars + typesetFormula(pair ? display : inline, valueOf).trim() + dollars;
     at = match.index + whole.length;
   }
   return result + inProse(text.slice(at), valueOf);
