@@ -39,7 +39,7 @@ export class Cursor {
   /** Choices that this text has met. */
   met = 0;
   /** Where the first of each choice was met. */
-  readonly places = new Map<number, Span>();
+  places: Map<number, Span> | null = null;
   /** Whether ± may stand here, and whether it has. */
   plusMinus = false;
   plusMinusSeen = false;
@@ -155,6 +155,7 @@ export class Cursor {
   /** Notes that a choice has another common reading. */
   meet(choice: number, span: Span): void {
     this.met |= choice;
+    this.places ??= new Map();
     if (!this.places.has(choice)) this.places.set(choice, { start: span.start, end: span.end });
   }
 

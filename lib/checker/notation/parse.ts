@@ -14,6 +14,7 @@ import { parseQuantity, unitStart } from './parse-quantity';
 import { parseSum } from './parse-sum';
 import { otherReadings, type Reading } from './readings';
 import { buildScope, checkNames, type Scope } from './scope';
+import { type Token } from './token';
 import { tokenise } from './tokenise';
 import { resolveWords } from './words';
 
@@ -79,14 +80,9 @@ function refuse(text: string): Diagnostic | null {
 function scopeOf(context: ReadingContext): { readonly scope: Scope; readonly problems: readonly Diagnostic[] | null } {
   const names = context.kind === 'quantity' ? [] : Object.keys(context.symbols);
   if (context.options?.definitions) names.push(...Object.keys(context.options.definitions));
-  const problems = checkNames(names);
-  return {
-    scope: buildScope(names, context.allowReferenceFunctions === true),
-    problems: problems.length > 0 ? problems : null,
-  };
+  const scope = buildScope(names, context.allowReferenceFunctions === true);
+  return { scope, problems: scope.sound ? null : checkNames(names) };
 }
-
-const nowhere: Reading['places'] = new Map();
 
 /** One reading, with the other side taken of the given choices. */
 function readOnce(text: string, context: ReadingContext, scope: Scope, taken: number): Reading {
@@ -98,19 +94,24 @@ function readOnce(text: string, context: ReadingContext, scope: Scope, taken: nu
     lowerExponent: !(other && scope.declaresE),
     upperExponent: !scope.declaresCapitalE,
   });
-  if (problem) return { tree: null, problem, met: 0, places: nowhere };
+  if (problem) return { tree: null, problem, met: 0, places: null };
   const comma = kind === 'scalar' || kind === 'quantity' ? findDecimalComma(tokens) : null;
-  if (comma) return { tree: null, problem: comma, met: 0, places: nowhere };
-  const unitAt = kind === 'quantity' ? unitStart(tokens) : tokens.length - 1;
-  const unit = tokens.splice(unitAt, tokens.length - 1 - unitAt);
+  if (comma) return { tree: null, problem: comma, met: 0, places: null };
+  const unit = kind === 'quantity' ? takeUnit(tokens) : [];
   const words = resolveWords(tokens, scope, other);
   const bars = pairBars(words.tokens);
-  if (bars) return { tree: null, problem: bars, met: 0, places: nowhere };
+  if (bars) return { tree: null, problem: bars, met: 0, places: null };
   const end = words.tokens.length - 1;
-  words.tokens.splice(end, 0, ...unit);
+  if (unit.length > 0) words.tokens.splice(end, 0, ...unit);
   const cursor = new Cursor(words.tokens, scope, grammar, taken);
   const tree = kind === 'quantity' ? parseQuantity(cursor, end, end + unit.length) : parseAnswer(cursor, kind, end);
   if (words.ambiguous) cursor.meet(choices.split, words.ambiguous);
   else if (lowerExponentUsed && scope.declaresE) cursor.meet(choices.split, { start: 0, end: text.length });
   return { tree: cursor.problem ? null : tree, problem: cursor.problem, met: cursor.met, places: cursor.places };
+}
+
+/** Takes the tokens of the unit out; its letters are no names. */
+function takeUnit(tokens: Token[]): Token[] {
+  const from = unitStart(tokens);
+  return tokens.splice(from, tokens.length - 1 - from);
 }

@@ -11,7 +11,7 @@ export interface Reading {
   readonly problem: Diagnostic | null;
   /** Bits of `choices` that the text met. */
   readonly met: number;
-  readonly places: ReadonlyMap<number, Span>;
+  readonly places: ReadonlyMap<number, Span> | null;
 }
 
 /**
@@ -52,9 +52,9 @@ function sizeOf(bits: number): number {
   return size;
 }
 
-function describe(taken: number, places: ReadonlyMap<number, Span>): Diagnostic {
+function describe(taken: number, places: Reading['places']): Diagnostic {
   const choice = taken & -taken;
-  const span = places.get(choice) ?? { start: 0, end: 0 };
+  const span = places?.get(choice) ?? { start: 0, end: 0 };
   const { message, hint } = sentences[choice] ?? { message: 'This can be read in two ways.', hint: 'Use brackets.' };
   return { code: 'ambiguous', span, message, hint };
 }

@@ -1,8 +1,7 @@
 /** The names that may be used in a text: declared symbols with their spellings, beside the built-in words. */
 import { type Diagnostic } from '../diagnostics';
-import { greekByName, greekNames } from './characters';
-import { isAsciiLetter, isBlank, isDigit, letterAt } from './source';
-import { subscriptOf } from './characters';
+import { greekByName, greekNames, subscriptOf } from './characters';
+import { isAsciiLetter, isDigit, letterAt } from './source';
 import { builtInWords, declarableWords, operatorMeaning, reservedWords, type Meaning } from './vocabulary';
 
 /** A name in parts: `omega_1'` is base ω, index 1, one prime. Greek words are letters. */
@@ -34,6 +33,8 @@ export interface Scope {
   readonly allowReferenceFunctions: boolean;
   readonly declaresE: boolean;
   readonly declaresCapitalE: boolean;
+  /** Whether every declared name may be declared; `checkNames` says which may not. */
+  readonly sound: boolean;
 }
 
 /** The letter a whole word spells (`omega` → ω), else the word itself. */
@@ -46,33 +47,43 @@ export function greekLetter(word: string): string {
  * primes.
  */
 export function nameParts(name: string): NameParts | null {
-  let position = 0;
-  let base = '';
-  while (letterAt(name, position) !== '' && position < name.length) {
-    base += letterAt(name, position);
+  let letters = 0;
+  while (isAsciiLetter(name.charCodeAt(letters))) letters += 1;
+  if (letters === name.length && letters > 0) return { base: greekLetter(name), index: '', primes: 0 };
+  return partsOf(name, letters);
+}
+
+function partsOf(name: string, asciiLetters: number): NameParts | null {
+  let position = asciiLetters;
+  let base = name.slice(0, asciiLetters);
+  for (let letter = letterAt(name, position); letter !== ''; letter = letterAt(name, position)) {
+    base += letter;
     position += 1;
   }
   let primes = primesAt(name, position);
   position += primes;
-  let index = '';
-  if (name.charAt(position) === '_') position += 1;
-  const braced = name.charAt(position) === '{';
+  const marked = name.charAt(position) === '_';
+  if (marked) position += 1;
+  const braced = marked && name.charAt(position) === '{';
   if (braced) position += 1;
-  for (;;) {
-    const character = name.charAt(position);
-    const letter = letterAt(name, position);
-    const plain = subscriptOf.get(character);
-    if (isDigit(name.charCodeAt(position)) || character === '+' || character === '-') index += character;
-    else if (letter !== '' || plain !== undefined) index += letter !== '' ? letter : plain;
-    else break;
+  let index = '';
+  for (let part = indexPart(name, position); part !== ''; part = indexPart(name, position)) {
+    index += part;
     position += 1;
   }
   if (braced && name.charAt(position) === '}') position += 1;
   const after = primesAt(name, position);
   primes += after;
   position += after;
-  if (base === '' || position !== name.length || (name.includes('_') && index === '')) return null;
+  if (base === '' || position !== name.length || (marked && index === '')) return null;
   return { base: greekLetter(base), index: greekLetter(index), primes };
+}
+
+function indexPart(name: string, position: number): string {
+  const character = name.charAt(position);
+  if (isDigit(name.charCodeAt(position)) || character === '+' || character === '-') return character;
+  const letter = letterAt(name, position);
+  return letter === '' ? (subscriptOf.get(character) ?? '') : letter;
 }
 
 function primesAt(name: string, from: number): number {
@@ -87,8 +98,10 @@ export function buildScope(names: readonly string[], allowReferenceFunctions: bo
   const plainSpellings: Spelling[] = [];
   const suffixed: Spelling[] = [];
   const joined: Spelling[] = [];
+  let sound = true;
   for (const name of names) {
     const parts = nameParts(name);
+    sound &&= parts !== null && !isReserved(parts);
     if (parts === null) continue;
     const { base, index, primes } = parts;
     const meaning: Meaning = { is: 'symbol', name };
@@ -114,6 +127,7 @@ export function buildScope(names: readonly string[], allowReferenceFunctions: bo
     allowReferenceFunctions,
     declaresE: plain.has('e'),
     declaresCapitalE: plain.has('E'),
+    sound,
   };
 }
 
@@ -176,15 +190,4 @@ function isOneEdit(one: string, other: string): boolean {
     rest(one, 0) === rest(other, 1) ||
     (one[start] === other[start + 1] && one[start + 1] === other[start] && rest(one, 2) === rest(other, 2))
   );
-}
-
-/** Whether a text is only white space. */
-export function isBlankText(text: string): boolean {
-  for (let index = 0; index < text.length; index += 1) if (!isBlank(text.charCodeAt(index))) return false;
-  return true;
-}
-
-/** Whether the text is one ASCII letter. */
-export function isOneLetter(text: string): boolean {
-  return text.length === 1 && isAsciiLetter(text.charCodeAt(0));
 }
