@@ -62,9 +62,9 @@ class Topic:
                     source="mpmath, 80 digits: " + shown(witness), slips=in_order(found), pair=pair, exactly=exactly, form=form,
                 )
 
-    def plain(self, verdict, kind, reference, answer, why, source, symbols=None, options=None, slips=None, pair=None, allowed=None, form=None, exactly=False):
+    def plain(self, verdict, kind, reference, answer, why, source, symbols=None, options=None, slips=None, pair=None, allowed=None, form=None, exactly=False, ambiguous=False):
         """A line whose label comes from a hand argument."""
-        self.add(verdict, kind, reference, answer, symbols if symbols is not None else self.symbols, options or {}, why=why, source=source, slips=in_order(set(slips or [])), pair=pair, allowed=allowed, form=form, exactly=exactly)
+        self.add(verdict, kind, reference, answer, symbols if symbols is not None else self.symbols, options or {}, why=why, source=source, slips=in_order(set(slips or [])), pair=pair, allowed=allowed, form=form, exactly=exactly, ambiguous=ambiguous)
 
     # --- parts --------------------------------------------------------------------------------------------------------
 
@@ -106,7 +106,7 @@ class Topic:
                 break
         return out
 
-    def add(self, verdict, kind, reference, answer, symbols, options, why, source, slips=None, pair=None, exactly=False, allowed=None, form=None):
+    def add(self, verdict, kind, reference, answer, symbols, options, why, source, slips=None, pair=None, exactly=False, allowed=None, form=None, ambiguous=False):
         key = (kind, reference, answer, json.dumps(options, sort_keys=True), json.dumps(symbols, sort_keys=True))
         if key in self.seen:
             return
@@ -118,7 +118,7 @@ class Topic:
         line["verdict"] = verdict
         if slips:
             line["slipsExactly" if exactly else "slips"] = list(slips)
-        for name, value in (("pair", pair), ("allowed", allowed), ("form", form)):
+        for name, value in (("pair", pair), ("allowed", allowed), ("form", form), ("ambiguous", ambiguous)):
             if value:
                 line[name] = value
         line["why"], line["source"] = why, source
