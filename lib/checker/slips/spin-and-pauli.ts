@@ -1,0 +1,24 @@
+import { type FormSlip } from './slip';
+import { everywhereAndEach } from './tree-changes';
+
+/** σ stands where S should. */
+export const pauliForSpin: FormSlip = {
+  type: 'form',
+  id: 'pauli-for-spin',
+  sentence: 'a Pauli matrix stands where a spin operator should',
+  change: (tree) =>
+    everywhereAndEach(tree, (node) =>
+      node.node === 'operator' && node.family === 'spin' ? { ...node, family: 'pauli' } : node,
+    ),
+};
+
+/** S stands where σ should. */
+export const spinForPauli: FormSlip = {
+  type: 'form',
+  id: 'spin-for-pauli',
+  sentence: 'a spin operator stands where a Pauli matrix should',
+  change: (tree) =>
+    everywhereAndEach(tree, (node) =>
+      node.node === 'operator' && node.family === 'pauli' ? { ...node, family: 'spin' } : node,
+    ),
+};
