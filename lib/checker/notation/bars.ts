@@ -1,8 +1,8 @@
 /** Pairing of the bars that are no part of a ket or bra. */
 import { type Diagnostic } from '../diagnostics';
 import { maximumDepth } from './limits';
-import { endsOperand, startsOperand } from './starts';
-import { type Token } from './token';
+import { endsOperand, nesting, startsOperand } from './starts';
+import { type Token, type TokenKind } from './token';
 
 /**
  * Turns every bar into an opening or a closing one, in place. Bars pair inside one bracket and one entry. Where two
@@ -18,45 +18,14 @@ export function pairBars(tokens: readonly Token[]): Diagnostic | null {
   };
   for (let index = 0; index < tokens.length; index += 1) {
     const token = tokens[index];
-    let problem: Diagnostic | null = null;
-    switch (token?.kind) {
-      case 'bar':
-        levels[levels.length - 1]?.push(index);
-        break;
-      case '(':
-      case '[':
-      case '{':
-      case 'begin':
-      case 'bar-open':
-        levels.push([]);
-        break;
-      case ')':
-      case ']':
-      case '}':
-      case 'end-environment':
-      case 'bar-close':
-        problem = resolve();
-        if (levels.length > 1) levels.pop();
-        break;
-      case ',':
-      case ';':
-      case ':':
-      case '=':
-      case '!=':
-      case '<':
-      case '<=':
-      case '>':
-      case '>=':
-      case '&':
-      case 'row':
-      case 'and':
-      case 'or':
-      case 'not':
-      case 'end':
-        problem = resolve();
-        break;
-    }
+    if (token === undefined) break;
+    if (token.kind === 'bar') levels[levels.length - 1]?.push(index);
+    const depth = nesting(token);
+    if (depth > 0) levels.push([]);
+    if (depth >= 0 && !separators.has(token.kind)) continue;
+    const problem = resolve();
     if (problem) return problem;
+    if (depth < 0 && levels.length > 1) levels.pop();
   }
   for (const bars of levels) {
     const problem = bars.length === 0 ? null : pair(tokens, bars);
@@ -64,6 +33,25 @@ export function pairBars(tokens: readonly Token[]): Diagnostic | null {
   }
   return null;
 }
+
+/** Tokens that end an entry: bars on their two sides do not pair. */
+const separators: ReadonlySet<TokenKind> = new Set([
+  ',',
+  ';',
+  ':',
+  '=',
+  '!=',
+  '<',
+  '<=',
+  '>',
+  '>=',
+  '&',
+  'row',
+  'and',
+  'or',
+  'not',
+  'end',
+]);
 
 /**
  * Counts the pairings, up to two. A bar can close after an operand and open before one; an opening bar directly before a

@@ -1,7 +1,7 @@
 /** The decoration `name =` before an answer, and the labels of values. */
 import { type Label } from './answer-tree';
 import { type Cursor } from './cursor';
-import { nesting } from './parse-product';
+import { nesting } from './starts';
 import { type Token, type TokenKind } from './token';
 
 /** Positions of tokens of a kind in a range, outside brackets. */

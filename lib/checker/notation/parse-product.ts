@@ -3,7 +3,7 @@ import { type Cursor } from './cursor';
 import { parsePowerOfTen } from './parse-number';
 import { parseDivisor, parseDivisorFactor, refuseNumbers } from './parse-run';
 import { isSign, parseSigned } from './parse-sign';
-import { startsOperand } from './starts';
+import { nesting, startsOperand } from './starts';
 import { type Token } from './token';
 import { type Expression, type Factor, type Join, type ProductNode } from './tree';
 import { isLiteralZero, productType, quotientType } from './typing';
@@ -112,26 +112,6 @@ function closingKet(cursor: Cursor): number {
     signed ||= isSign(token) && before !== '^' && before !== '*' && before !== '/';
   }
   return -1;
-}
-
-/** +1 for an opening bracket, −1 for a closing one. */
-export function nesting(token: Token): number {
-  switch (token.kind) {
-    case '(':
-    case '[':
-    case '{':
-    case 'begin':
-    case 'bar-open':
-      return 1;
-    case ')':
-    case ']':
-    case '}':
-    case 'end-environment':
-    case 'bar-close':
-      return -1;
-    default:
-      return 0;
-  }
 }
 
 function pushInside(factors: Factor[], inside: Expression): void {

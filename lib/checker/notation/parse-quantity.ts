@@ -189,7 +189,7 @@ function namedUnits(cursor: Cursor, token: Token): readonly UnitFactor[] {
 /** The power after a unit, 1 where none is written. */
 function unitPower(cursor: Cursor): number {
   const token = cursor.peek();
-  let text = '';
+  let text: string;
   if (token.kind === 'superscript') {
     cursor.next();
     text = token.text;

@@ -1,6 +1,6 @@
 /** The parser's door: from text to tree, in every common reading. */
 import { type Diagnostic } from '../diagnostics';
-import { type AnswerTree, type Condition, type ParseResult, type ReadingContext, type Symbols } from './answer-tree';
+import { type Condition, type ParseResult, type ReadingContext, type Symbols } from './answer-tree';
 import { pairBars } from './bars';
 import { choices, Cursor, type Grammar } from './cursor';
 import { findDecimalComma } from './decimal-comma';

@@ -53,3 +53,23 @@ export function endsOperand(token: Token | undefined): boolean {
       return false;
   }
 }
+
+/** +1 for an opening bracket, −1 for a closing one. */
+export function nesting(token: Token): number {
+  switch (token.kind) {
+    case '(':
+    case '[':
+    case '{':
+    case 'begin':
+    case 'bar-open':
+      return 1;
+    case ')':
+    case ']':
+    case '}':
+    case 'end-environment':
+    case 'bar-close':
+      return -1;
+    default:
+      return 0;
+  }
+}
