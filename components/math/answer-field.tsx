@@ -5,7 +5,9 @@ import { fieldId } from '@/components/ui/field-frame';
 import { ReadBack } from './read-back';
 import { type ReadAnswer, type ReadingOf, type ReadingRequest, useReading } from './use-reading';
 
-export interface AnswerFieldProps extends ReadingRequest {
+export interface AnswerFieldProps extends Omit<ReadingRequest, 'symbols'> {
+  /** Declared symbols; none where left out. */
+  readonly symbols?: ReadingRequest['symbols'];
   readonly name: string;
   /** When two fields of one page bear the same name. */
   readonly id?: string;
@@ -43,7 +45,7 @@ export function AnswerField({
   onTyped,
   read,
   kind,
-  symbols,
+  symbols = {},
   options,
 }: AnswerFieldProps) {
   const [text, setText] = useState(defaultValue);

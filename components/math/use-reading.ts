@@ -7,8 +7,8 @@ import { type Diagnostic } from '@/lib/checker/diagnostics';
 /** What the reader is told about the answer it reads. */
 export interface ReadingRequest {
   readonly kind: AnswerKind;
-  readonly symbols?: SymbolTable;
-  readonly options?: CheckOptions;
+  readonly symbols: SymbolTable;
+  readonly options?: Pick<CheckOptions, 'choices' | 'definitions'>;
 }
 
 /** How a typed text was understood. */

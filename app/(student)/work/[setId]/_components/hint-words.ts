@@ -1,0 +1,21 @@
+import { type PartReading } from '@/lib/templates/read-answer';
+
+/** What is asked for, by kind, without giving the form of the answer away. */
+const kinds: Record<PartReading['kind'], string> = {
+  scalar: 'An expression',
+  quantity: 'A number with its unit',
+  operator: 'An operator, as a matrix or in symbols',
+  pauli: 'Pauli coefficients, or the operator itself',
+  eigenvalues: 'Eigenvalues, in any order',
+  state: 'A state, as kets or as components',
+  eigenpairs: 'Eigenvalues, each with its state',
+  vector: 'A vector by its components',
+  choice: 'One of the choices',
+};
+
+/** The line below an answer field. */
+export function hintFor({ kind, symbols }: PartReading): string {
+  const names = Object.keys(symbols);
+  if (kind === 'choice' || kind === 'quantity' || names.length === 0) return `${kinds[kind]}.`;
+  return `${kinds[kind]}. Declared here: ${names.join(', ')}.`;
+}

@@ -1,0 +1,35 @@
+import { Markdown } from '@/components/math/markdown';
+import { PartRow } from '@/components/ui/script-page';
+import { type StudentPart } from '@/lib/presenters/student-set';
+import { PartMargin } from './part-margin';
+import { SubmittedAnswer } from './submitted-answer';
+
+interface ShownPartProps {
+  readonly part: StudentPart;
+  readonly zone: string;
+  /** Why nothing can be typed here, where that needs saying. */
+  readonly why?: string;
+}
+
+/** A part that takes no more answers: one's own answer, and what was typed and never submitted. */
+export function ShownPart({ part, zone, why }: ShownPartProps) {
+  return (
+    <PartRow
+      letter={part.key}
+      prompt={<Markdown source={part.prompt} inline />}
+      margin={<PartMargin part={part} zone={zone} nothing="nothing was submitted" />}
+    >
+      {part.handedIn ? (
+        <SubmittedAnswer text={part.handedIn.text} reading={part.reading} />
+      ) : (
+        <p className="text-small text-grey">No answer was submitted.</p>
+      )}
+      {part.unsent?.trim() ? (
+        <p className="mt-2 text-small text-grey">
+          Typed and never submitted: <code className="break-words whitespace-pre-wrap text-ink">{part.unsent}</code>
+        </p>
+      ) : null}
+      {why ? <p className="mt-2 text-small text-grey">{why}</p> : null}
+    </PartRow>
+  );
+}
