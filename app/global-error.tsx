@@ -2,6 +2,7 @@
 
 import { Button } from '@/components/ui/button';
 import { ErrorState } from '@/components/ui/states';
+import { latinFace } from './typefaces';
 import './globals.css';
 
 interface GlobalErrorProps {
@@ -12,7 +13,7 @@ interface GlobalErrorProps {
 /** The last resort: the layout itself failed, so this page brings its own html and body. */
 export default function GlobalError({ error, reset }: GlobalErrorProps) {
   return (
-    <html lang="en">
+    <html lang="en" className={latinFace.variable}>
       <body>
         <title>Something failed · Halfmark</title>
         <main className="script p-(--gutter)">

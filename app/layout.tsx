@@ -4,6 +4,7 @@ import type { ReactNode } from 'react';
 import { readTheme, themeCookie } from '@/components/ui/theme';
 import { ThemeSwitch } from '@/components/ui/theme-switch';
 import { ToastProvider } from '@/components/ui/toast';
+import { latinFace } from './typefaces';
 import './globals.css';
 
 export const metadata: Metadata = {
@@ -29,7 +30,12 @@ export const viewport: Viewport = {
 export default async function RootLayout({ children }: { children: ReactNode }) {
   const theme = readTheme((await cookies()).get(themeCookie)?.value);
   return (
-    <html lang="en" data-theme={theme === 'device' ? undefined : theme} suppressHydrationWarning>
+    <html
+      lang="en"
+      className={latinFace.variable}
+      data-theme={theme === 'device' ? undefined : theme}
+      suppressHydrationWarning
+    >
       <body>
         <a
           href="#main"
