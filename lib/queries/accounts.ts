@@ -1,5 +1,6 @@
 import { QueryTypes } from 'sequelize';
 import { database } from '@/lib/db/connection';
+import { type CourseRole } from '@/lib/domain/roles';
 import { HalfmarkError } from '@/lib/errors';
 
 /** An account as the list of all accounts shows it. */
@@ -10,7 +11,7 @@ export type AccountInList = {
   isAdministrator: boolean;
   hasPassword: boolean;
   isDeactivated: boolean;
-  courses: string[];
+  courses: { code: string; role: CourseRole }[];
 };
 
 export const accountsPerPage = 50;
@@ -18,9 +19,9 @@ export const accountsPerPage = 50;
 const columns = `
   u.id, u.name, u.email, u.is_administrator as "isAdministrator", u.password_hash is not null as "hasPassword",
   u.deactivated_at is not null as "isDeactivated",
-  coalesce((select array_agg(c.code || ' (' || m.role || ')' order by c.code)
+  coalesce((select json_agg(json_build_object('code', c.code, 'role', m.role) order by c.code)
               from memberships m join courses c on c.id = m.course_id
-             where m.user_id = u.id and m.left_at is null), '{}') as courses`;
+             where m.user_id = u.id and m.left_at is null), '[]') as courses`;
 
 /**
  * One account that is not erased.

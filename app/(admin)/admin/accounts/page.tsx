@@ -7,6 +7,7 @@ import { DataTable } from '@/components/ui/data-table';
 import { Field } from '@/components/ui/fields';
 import { Pager } from '@/components/ui/pager';
 import { MarginNote, PageTitle, ScriptPage, Section } from '@/components/ui/script-page';
+import { roleName } from '@/lib/domain/roles';
 import { paths } from '@/lib/paths';
 import { accounts, accountsPerPage, type AccountInList } from '@/lib/queries/accounts';
 import { AccountForm } from './_components/account-form';
@@ -38,7 +39,7 @@ export default async function AccountsPage({ searchParams }: Props) {
             <Button type="submit">Find</Button>
           </Form>
           <DataTable
-            caption={query.search === '' ? 'All accounts' : `Accounts with “${query.search}”`}
+            caption={captionFor(query.search, total)}
             columns={columns}
             rows={rows.map(rowOf)}
             filterLabel={null}
@@ -62,6 +63,11 @@ export default async function AccountsPage({ searchParams }: Props) {
   );
 }
 
+function captionFor(search: string, total: number): string {
+  const found = `${total} ${total === 1 ? 'account' : 'accounts'}`;
+  return `${found}${search === '' ? '' : ` with “${search}”`}, shown here`;
+}
+
 function rowOf(account: AccountInList) {
   const state = account.isDeactivated ? 'closed' : account.hasPassword ? 'open' : 'invited';
   return {
@@ -69,7 +75,7 @@ function rowOf(account: AccountInList) {
     cells: {
       name: { value: account.name, href: paths.adminAccount(account.id) },
       email: account.email,
-      courses: account.courses.join(', '),
+      courses: account.courses.map(({ code, role }) => `${code}: ${roleName(role)}`).join(', '),
       office: account.isAdministrator ? 'administrator' : '',
       state,
     },

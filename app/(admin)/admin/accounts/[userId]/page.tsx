@@ -2,8 +2,10 @@ import { AdminHead } from '@/app/(admin)/_components/admin-head';
 import { ActionButton } from '@/app/_components/action-button';
 import { openAdminPage } from '@/app/_server/admin-page';
 import { idsOf, pageOf } from '@/app/_server/page';
+import { DefinitionList } from '@/components/ui/definition-list';
 import { MarginNote, PageTitle, ScriptPage, Section } from '@/components/ui/script-page';
 import { Notice } from '@/components/ui/notice';
+import { roleName } from '@/lib/domain/roles';
 import { paths } from '@/lib/paths';
 import { accountById, type AccountInList } from '@/lib/queries/accounts';
 import { saveAccount } from '../actions';
@@ -27,7 +29,7 @@ export default async function AccountPage({ params }: Props) {
         place={account.name}
       />
       <ScriptPage>
-        <Section margin={<MarginNote>{account.courses.join(', ') || 'In no course.'}</MarginNote>}>
+        <Section margin={<Courses account={account} />}>
           <PageTitle kicker={account.email}>{account.name}</PageTitle>
           {isOwn ? (
             <Notice>
@@ -43,6 +45,11 @@ export default async function AccountPage({ params }: Props) {
       </ScriptPage>
     </>
   );
+}
+
+function Courses({ account }: { account: AccountInList }) {
+  if (account.courses.length === 0) return <MarginNote>In no course.</MarginNote>;
+  return <DefinitionList items={account.courses.map(({ code, role }) => ({ term: code, value: roleName(role) }))} />;
 }
 
 function Access({ account }: { account: AccountInList }) {

@@ -15,7 +15,7 @@ export function EditCourseForm({ courseId, values }: Props) {
   const toast = useToast();
   const { form, faults } = useActionForm(saveCourse, () => toast('The course is saved.'));
   return (
-    <form {...form} key={JSON.stringify(values)} className="grid gap-4">
+    <form key={JSON.stringify(values)} {...form} className="grid gap-4">
       <FormErrorSummary errors={faults} />
       <input type="hidden" name="courseId" value={courseId} />
       <CourseFields values={values} faults={faults} />
