@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { setPolicySchema } from '@/lib/domain/set-policy';
 import { HalfmarkError } from '@/lib/errors';
 import { applyRuling } from './apply-ruling';
+import { reissueIfReleased } from './compose-score-report';
 import type { ServiceContext } from './context';
 import { drawSecondMarking } from './draw-second-marking';
 import { assertHeldBy, loadItemForGrading } from './load-item-for-grading';
@@ -36,6 +37,11 @@ export async function ruleOnAnswer(
     outOf,
     comment: input.comment,
     millisecondsSpent: input.millisecondsSpent,
+  });
+  await reissueIfReleased(context, {
+    problemSetId: set.id,
+    userId: draw.userId,
+    reason: 'A part that was still being marked has been marked.',
   });
   const secondMarking = await drawSecondMarking(context, {
     ruling,

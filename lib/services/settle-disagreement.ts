@@ -1,12 +1,15 @@
 import { z } from 'zod';
+import { Answer } from '@/models/answer';
 import { ProblemSet } from '@/models/problem-set';
 import { QueueItem } from '@/models/queue-item';
 import { Ruling } from '@/models/ruling';
 import { SecondMarking } from '@/models/second-marking';
+import { Submission } from '@/models/submission';
 import { HalfmarkError } from '@/lib/errors';
 import { decide, requireAllowed, requirePerson } from '@/lib/policies/decide';
 import { courseForActor } from '@/lib/queries/course-for-actor';
 import { applyRuling } from './apply-ruling';
+import { reissueIfReleased } from './compose-score-report';
 import type { ServiceContext } from './context';
 
 export const settleDisagreementInput = z.object({
@@ -49,5 +52,12 @@ export async function settleDisagreement(
     { state: 'settled', settledBy: settler.userId, settledCredit: input.credit, settledAt: now },
     { transaction },
   );
+  const answer = await Answer.findByPk(first.answerId, { transaction, rejectOnEmpty: true });
+  const submission = await Submission.findByPk(answer.submissionId, { transaction, rejectOnEmpty: true });
+  await reissueIfReleased(context, {
+    problemSetId: set.id,
+    userId: submission.userId,
+    reason: 'A part has been settled after second marking.',
+  });
   return { rulingId: ruling.id };
 }
