@@ -2,6 +2,7 @@
 
 import { type ReactNode, useEffect, useRef, useState } from 'react';
 import { fieldId } from '@/components/ui/field-frame';
+import { read as readAnswer } from '@/lib/checker/reader';
 import { ReadBack } from './read-back';
 import { type ReadAnswer, type ReadingOf, type ReadingRequest, useReading } from './use-reading';
 
@@ -22,8 +23,8 @@ export interface AnswerFieldProps extends Omit<ReadingRequest, 'symbols'> {
   /** Told whenever the reading changes; null for an empty field. */
   readonly onReading?: (reading: ReadingOf | null) => void;
   readonly onTyped?: (text: string) => void;
-  /** The reader; left out, Halfmark's own. Must be the same function at every render. */
-  readonly read: ReadAnswer;
+  /** In place of the checker's reader; must be the same function at every render. */
+  readonly read?: ReadAnswer;
 }
 
 /** How long a reading rests before it is announced, so that a screen reader is not interrupted at every key. */
@@ -43,7 +44,7 @@ export function AnswerField({
   disabled,
   onReading,
   onTyped,
-  read,
+  read = readAnswer,
   kind,
   symbols = {},
   options,

@@ -1,28 +1,20 @@
 'use client';
 
 import { useEffect, useState } from 'react';
-import { type AnswerKind, type CheckOptions, type SymbolTable } from '@/lib/checker/contract';
-import { type Diagnostic } from '@/lib/checker/diagnostics';
+import { type AnswerKind, type SymbolTable } from '@/lib/checker/contract';
+import { type Reading } from '@/lib/checker/reader';
 
 /** What the reader is told about the answer it reads. */
 export interface ReadingRequest {
   readonly kind: AnswerKind;
   readonly symbols: SymbolTable;
-  readonly options?: Pick<CheckOptions, 'choices' | 'definitions'>;
+  readonly options?: {
+    readonly choices?: readonly string[];
+    readonly definitions?: Readonly<Record<string, string>>;
+  };
 }
 
-/** How a typed text was understood. */
-export interface Reading {
-  readonly readable: boolean;
-  /** As typed, typeset; empty when it is not readable. */
-  readonly latex: string;
-  /** As typed, for a screen reader. */
-  readonly plain: string;
-  readonly diagnostics: readonly Diagnostic[];
-  /** Whether people write the same with another meaning too. */
-  readonly ambiguous: boolean;
-}
-
+/** The checker's reader, or something that answers like it. */
 export type ReadAnswer = (text: string, request: ReadingRequest) => Reading;
 
 /** A reading with the text it belongs to. */

@@ -60,7 +60,7 @@ const rest = async (milliseconds: number) => {
   for (let left = milliseconds; left > 0; left -= 20) await act(() => vi.advanceTimersByTimeAsync(20));
 };
 const show = (props: Partial<Parameters<typeof AnswerField>[0]> = {}) =>
-  render(<AnswerField name="a" label="Answer to part a" kind="scalar" read={read} {...props} />);
+  render(<AnswerField name="a" label="Answer to part a" kind="scalar" symbols={{}} read={read} {...props} />);
 
 describe('AnswerField', () => {
   it('shows a readable answer almost at once and announces it after a rest', async () => {
@@ -140,5 +140,22 @@ describe('AnswerField', () => {
     );
     await rest(100);
     expect(read).toHaveBeenLastCalledWith('x', expect.objectContaining({ symbols: { x: 'positive' } }));
+  });
+
+  it("reads with the checker's own reader when it is given no other", async () => {
+    show({ read: undefined, symbols: { omega: 'positive' } });
+    type('hbar*omega/2');
+    await rest(100);
+    expect(screen.getByRole('img').getAttribute('aria-label')).toContain('omega');
+    type('hbar*omega/');
+    await rest(700);
+    expect(document.querySelector('mark')).not.toBeNull();
+    expect(field().getAttribute('aria-invalid')).toBe('true');
+  });
+
+  it('belongs to a form elsewhere on the page', () => {
+    show({ id: 'q1-a', form: 'q1' });
+    expect(field().id).toBe('q1-a');
+    expect(field().getAttribute('form')).toBe('q1');
   });
 });
