@@ -17,7 +17,7 @@ export default defineConfig({
         test: {
           name: 'unit',
           include: [
-            'tests/{checker,templates,statistics,domain,components,policies,mail,uploads,scripts,lib}/**/*.test.{ts,tsx}',
+            'tests/{checker,templates,statistics,domain,components,policies,presenters,mail,uploads,scripts,lib}/**/*.test.{ts,tsx}',
           ],
           setupFiles: ['tests/setup/block-network.ts'],
         },
