@@ -4,6 +4,7 @@ import json
 import os
 import pickle
 import random
+import re
 import zlib
 from collections import Counter
 
@@ -30,7 +31,7 @@ class Topic:
 
     # --- the three kinds of line --------------------------------------------------------------------------------------
 
-    def agree(self, kind, ref, *answers, why, n=2, symbols=None, options=None, fix=None, substitute=None, proof=None, form=None, loose=True, modes=MODES, reftext=None, wild=False):
+    def agree(self, kind, ref, *answers, why, n=2, symbols=None, options=None, fix=None, substitute=None, proof=None, form=None, loose=True, modes=MODES, reftext=None):
         """Answers that agree with `ref`: each is written `n` times in different spellings (a hand-written text once)."""
         symbols, options = self.table(symbols, ref, answers), options or {}
         for ans in answers:
@@ -44,10 +45,10 @@ class Topic:
                 continue
             method = f"SymPy ({', '.join(ways)})" if ways else f"by hand: {proof}"
             source = f"{method}; equal to 55 digits at {good} points of the domain"
-            for text in self.spell(ans, kind, n, loose, modes, wild):
-                self.add("agrees", kind, self.reference(ref, kind, reftext), text, symbols, options, why=why, source=source, form=form)
+            for text in self.spell(ans, kind, n, loose, modes, symbols):
+                self.add("agrees", kind, self.reference(ref, kind, reftext, symbols), text, symbols, options, why=why, source=source, form=form)
 
-    def differ(self, kind, ref, *answers, why, n=1, symbols=None, options=None, fix=None, slips=None, pair=None, exactly=False, form=None, modes=MODES, reftext=None, tree_ref=None, quiet=False):
+    def differ(self, kind, ref, *answers, why, n=1, symbols=None, options=None, fix=None, slips=None, pair=None, exactly=False, form=None, modes=MODES, reftext=None, quiet=False):
         """Answers that differ from `ref` at a point of the domain; value slips that fit there are found and added to `slips`."""
         symbols, options = self.table(symbols, ref, answers), options or {}
         for ans in answers:
@@ -56,9 +57,9 @@ class Topic:
                 self.doubt("differ", kind, ref, ans, f"agrees at all {good} points", None)
                 continue
             found = set(slips or []) | (set() if quiet else value_slips(kind, ref, ans, symbols, options, fix))
-            for text in self.spell(ans, kind, n, False, modes, False):
+            for text in self.spell(ans, kind, n, False, modes, symbols):
                 self.add(
-                    "differs", kind, self.reference(ref, kind, reftext), text, symbols, options, why=why,
+                    "differs", kind, self.reference(ref, kind, reftext, symbols), text, symbols, options, why=why,
                     source="mpmath, 80 digits: " + shown(witness), slips=in_order(found), pair=pair, exactly=exactly, form=form,
                 )
 
@@ -72,22 +73,24 @@ class Topic:
         """The declared symbols that the two use."""
         table = {**self.symbols, **(symbols or {})}
         used = {p.a[0] for n in (ref, *answers) for p in walk(n) if p.k == "sym"}
+        written = set(re.findall(r"[A-Za-z]+(?:_[A-Za-z0-9])?", ref.a[0])) if ref.k == "raw" else set()
+        used |= written & set(table)
         missing = used - set(table)
         if missing:
             raise ValueError(f"{self.name}: undeclared {missing}")
         kept = {k: v for k, v in table.items() if k in used or (symbols and k in symbols)}
         return kept
 
-    def reference(self, ref, kind, given):
+    def reference(self, ref, kind, given, symbols):
         if given:
             return given
         if ref.k == "raw":
             return ref.a[0]
-        writer = Writer("ascii", random.Random(7), euler="e" not in self.symbols)
+        writer = Writer("ascii", random.Random(7), euler="e" not in symbols)
         writer.labels = False
         return writer.text(ref, kind)
 
-    def spell(self, ans, kind, n, loose, modes, wild):
+    def spell(self, ans, kind, n, loose, modes, symbols):
         if ans.k == "raw":
             return [ans.a[0]]
         out = []
@@ -96,7 +99,7 @@ class Topic:
         start = rng.randrange(len(modes))
         for k in range(n * 3):
             mode = modes[(start + k) % len(modes)]
-            writer = Writer(mode, rng, loose=loose and rng.random() < 0.5, euler="e" not in self.symbols)
+            writer = Writer(mode, rng, loose=loose and rng.random() < 0.5, euler="e" not in symbols)
             text = writer.text(ans, kind)
             if mode == "tex":
                 text = decorate(text, rng)

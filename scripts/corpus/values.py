@@ -77,6 +77,13 @@ def evaluate(n, b):
         return b.env[a[0]]
     if k in ("def", "raw"):
         return evaluate(a[1], b)
+    if k == "const":
+        return a[0]
+    if k == "list":
+        found = [evaluate(x, b) for x in a[0]]
+        return ("k" if len(found) == 2 else "t", found)
+    if k == "euler":
+        return b.fn("exp", [b.num(Fraction(1))])
     if k in ("i", "pi"):
         return getattr(b, k)
     if k == "hbar":
@@ -112,6 +119,8 @@ def evaluate(n, b):
     if k == "dag":
         return adjoint(parts[0], b)
     if k == "transpose":
+        if tag(parts[0]) == "k":
+            return parts[0]
         m = parts[0][1]
         return ("m", [[m[0][0], m[1][0]], [m[0][1], m[1][1]]])
     if k == "inv":
