@@ -16,3 +16,6 @@ const names: Record<AnswerKind, string> = {
 export function kindName(kind: AnswerKind): string {
   return names[kind];
 }
+
+/** Every kind with its name, in the order in which they are offered. */
+export const answerKindNames = Object.entries(names).map(([kind, name]) => ({ kind: kind as AnswerKind, name }));

@@ -4,7 +4,8 @@ import { HalfmarkError } from '@/lib/errors';
 import { canWriteTemplate } from '@/lib/policies/can-write-template';
 import { requireAllowed, requirePerson } from '@/lib/policies/decide';
 import { departmentForPolicy } from '@/lib/queries/departments-of';
-import { emptyDraft, templateDraftSchema } from '@/lib/templates/draft';
+import { emptyDraft } from '@/lib/templates/blank-draft';
+import { templateDraftSchema } from '@/lib/templates/draft';
 import { type ServiceContext } from './context';
 import { recordAuditEvent } from './record-audit-event';
 

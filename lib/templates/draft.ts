@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { optionsOfKind } from './blank-draft';
 import { answerKinds, templateContentSchema, type TemplateContent } from './content';
 
 /**
@@ -71,29 +72,6 @@ export const templateDraftSchema = z.object({
 export type TemplateDraft = z.infer<typeof templateDraftSchema>;
 export type DraftPart = TemplateDraft['parts'][number];
 export type DraftParameter = TemplateDraft['parameters'][number];
-
-/** The options that mean something for a kind of answer; the others are left out of the content. */
-export const optionsOfKind: Record<DraftPart['kind'], readonly (keyof DraftPart['options'])[]> = {
-  scalar: ['answerForm'],
-  quantity: ['toleranceKind'],
-  operator: ['upToPhase', 'answerForm'],
-  pauli: ['answerForm'],
-  eigenvalues: ['answerForm'],
-  state: ['upToPhase', 'upToScale', 'requireNormalised', 'answerForm'],
-  eigenpairs: ['requireNormalised', 'answerForm'],
-  vector: ['answerForm'],
-  choice: ['choices'],
-};
-
-/** An empty part under the given letter. */
-export function emptyPart(key: string): DraftPart {
-  return draftPartSchema.parse({ key, kind: 'scalar', options: {}, weight: '1' });
-}
-
-/** A new question with one empty part. */
-export function emptyDraft(title: string): TemplateDraft {
-  return templateDraftSchema.parse({ title, parts: [emptyPart('a')] });
-}
 
 /**
  * What a draft says as template content, not yet checked: `templateContentSchema` tells whether it is one. Numbers that

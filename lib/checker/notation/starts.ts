@@ -18,9 +18,11 @@ export function startsOperand(token: Token): boolean {
     case '(':
     case '[':
     case '{':
-    case '<':
     case 'begin':
       return true;
+    case '<':
+      // The relation of a condition is written `<`; the angle of a bra that is none is written `⟨`.
+      return token.text === '⟨';
     default:
       return false;
   }
