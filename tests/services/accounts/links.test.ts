@@ -49,8 +49,8 @@ describe('an invitation', () => {
     await sendAccountMailBy(send, { linkTokenId: link.id }, now);
     const mail = send.mock.calls[0]?.[0];
     expect(mail?.to).toEqual({ name: 'Nia Brook', address: user.email });
-    expect(String(mail?.text)).toContain(`/invitation/${token}`);
-    expect(String(mail?.html)).toContain(`/invitation/${token}`);
+    expect(mail?.text).toContain(`/invitation/${token}`);
+    expect(mail?.html).toContain(`/invitation/${token}`);
     expect(mail?.subject).toContain(course.code);
     expect(await linkState('invitation', token, now)).toEqual({ name: 'Nia Brook', email: user.email });
 
