@@ -112,7 +112,13 @@ function parseTurn(cursor: Cursor, base: Expression, mark: Token, braced: boolea
 function parseExponent(cursor: Cursor): Expression {
   const token = cursor.peek();
   if (isSign(token)) return parseSigned(cursor, parseExponent);
-  if (!startsOperand(token)) return cursor.fail('missing-operand', token, 'An exponent is missing after ^.');
+  if (!startsOperand(token)) {
+    return cursor.fail(
+      'missing-operand',
+      cursor.atEnd() ? cursor.previous() : token,
+      'An exponent is missing after ^.',
+    );
+  }
   const exponent = cursor.grammar.power(cursor);
   return exponent.node === 'group' && token.kind === '(' ? exponent.body : exponent;
 }

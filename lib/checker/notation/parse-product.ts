@@ -5,7 +5,7 @@ import { parseDivisor, parseDivisorFactor, refuseNumbers } from './parse-run';
 import { isSign, parseSigned } from './parse-sign';
 import { nesting, startsOperand } from './starts';
 import { type Token } from './token';
-import { type Expression, type Factor, type Join, type ProductNode } from './tree';
+import { type Expression, type Factor, type Join, type ProductNode, type ValueType } from './tree';
 import { isLiteralZero, productType, quotientType } from './typing';
 
 /**
@@ -17,7 +17,7 @@ export function parseProduct(cursor: Cursor): Expression {
   const first = parseFactor(cursor);
   let token = cursor.peek();
   let join = joinOf(token);
-  let inside = insideBraket(cursor, first);
+  let inside = insideBraket(cursor, first, 'scalar');
   if (join === null && inside === null) return first;
   const factors: Factor[] = [{ join: 'unwritten', body: first }];
   let type = first.type;
@@ -32,11 +32,12 @@ export function parseProduct(cursor: Cursor): Expression {
     join = joinOf(token);
     if (join === null) break;
     const body = parseJoined(cursor, join, last);
+    const before = type;
     const typed = join === 'over' ? quotientType(type, body.type) : productType(type, body.type);
     type = cursor.typed(typed, join === 'over' ? body.span : { start: last.span.start, end: body.span.end });
     factors.push({ join, body });
     last = body;
-    inside = insideBraket(cursor, body);
+    inside = insideBraket(cursor, body, before);
   }
   const span = { start: first.span.start, end: last.span.end };
   return cursor.node<ProductNode>({ node: 'product', type, span, factors });
@@ -82,10 +83,11 @@ function refuseMixed(cursor: Cursor, last: Expression, body: Expression): void {
 
 /**
  * braket = bra sum ket, where the sum holds a sign outside brackets, as in `<+|S_x + S_y|->`: the bars then hold the
- * sum together. Null where the factor just read is no bra, or no sign stands before its ket.
+ * sum together. Null where the factor just read is no bra, where no sign stands before its ket, and after a ket: there
+ * `|+><+| - |-><-|` is a difference of two operators.
  */
-function insideBraket(cursor: Cursor, factor: Expression): Expression | null {
-  if (factor.node !== 'bra' || cursor.previous().kind !== 'bra') return null;
+function insideBraket(cursor: Cursor, factor: Expression, before: ValueType): Expression | null {
+  if (factor.node !== 'bra' || before !== 'scalar' || cursor.previous().kind !== 'bra') return null;
   const close = closingKet(cursor);
   if (close < 0) return null;
   return cursor.within(cursor.at, close, () => {

@@ -1,6 +1,7 @@
 /** Quantities: a numeric constant, then a unit. */
 import { type QuantityNode, type UnitFactor } from './answer-tree';
 import { type Cursor } from './cursor';
+import { outsideBrackets, passLeftSide } from './left-side';
 import { type Token } from './token';
 import { type Expression } from './tree';
 import { unitsOf } from './units';
@@ -12,7 +13,8 @@ import { builtInWords } from './vocabulary';
  */
 export function unitStart(tokens: readonly Token[]): number {
   let depth = 0;
-  for (let index = 0; index < tokens.length - 1; index += 1) {
+  const equals = outsideBrackets(tokens, 0, tokens.length - 1, '=')[0];
+  for (let index = equals === undefined ? 0 : equals + 1; index < tokens.length - 1; index += 1) {
     const token = tokens[index];
     if (token === undefined) break;
     if (token.kind === '(' || token.kind === '[' || token.kind === '{') {
@@ -43,9 +45,10 @@ function beforeJoin(tokens: readonly Token[], index: number): number {
   return kind === '*' || kind === '/' ? index - 1 : index;
 }
 
-/** quantity = value [ [ `*` | `/` ] unit ], the value read already up to where the unit starts */
+/** quantity = [ left-side ] value [ [ `*` | `/` ] unit ], the value read already up to where the unit starts */
 export function parseQuantity(cursor: Cursor, unitAt: number, end: number): QuantityNode {
-  const value = cursor.within(0, unitAt, () => {
+  const { from } = passLeftSide(cursor, 0, unitAt);
+  const value = cursor.within(from, unitAt, () => {
     const sum = cursor.grammar.sum(cursor);
     if (!cursor.atEnd()) cursor.fail('unexpected', cursor.peek(), 'This is not expected in the value.');
     return sum;

@@ -81,7 +81,9 @@ function scopeOf(context: ReadingContext): { readonly scope: Scope; readonly pro
   const names = context.kind === 'quantity' ? [] : Object.keys(context.symbols);
   if (context.options?.definitions) names.push(...Object.keys(context.options.definitions));
   const scope = buildScope(names, context.allowReferenceFunctions === true);
-  return { scope, problems: scope.sound ? null : checkNames(names) };
+  if (scope.sound) return { scope, problems: null };
+  const nowhere = { start: 0, end: 0 };
+  return { scope, problems: checkNames(names).map((problem) => ({ ...problem, span: nowhere })) };
 }
 
 /** One reading, with the other side taken of the given choices. */

@@ -161,15 +161,15 @@ function sumText(terms: readonly Term[]): string {
 }
 
 /**
- * The first quotient of a product as a fraction, later ones with a slash; a written sign wherever leaving it out would
+ * The first quotient of a product as a fraction, later ones and those of a fraction with a slash; a written sign wherever leaving it out would
  * read differently.
  */
 function productText({ factors }: ProductNode): string {
   const slash = factors.findIndex(({ join }) => join === 'over');
   let text = '';
   let from = 0;
-  if (slash > 0) {
-    const top = factors.slice(0, slash);
+  const top = factors.slice(0, Math.max(0, slash));
+  if (slash > 0 && top.every(({ body }) => body.node !== 'fraction')) {
     const numerator = top.length === 1 && top[0] ? open(top[0].body) : runText('', top, 0, factors);
     const divisor = factors[slash]?.body;
     text = `\\frac{${numerator}}{${divisor ? open(divisor) : ''}}`;
@@ -183,8 +183,7 @@ function runText(begun: string, part: readonly Factor[], offset: number, all: re
   part.forEach(({ join, body }, position) => {
     const before = all[offset + position - 1]?.body;
     const previousOver = position > 0 && part[position - 1]?.join === 'over';
-    const inBraket = before?.node === 'bra' && part[position + 1]?.body.node === 'ket';
-    const factor = inBraket && body.node === 'sum' ? print(body) : factorText(body, join, text === '');
+    const factor = factorText(body, join, text === '');
     if (text === '') text = factor;
     else if (join === 'over') text += `/${factor}`;
     else if (join === 'times' || previousOver || needsSign(before, factor)) text += `\\cdot ${factor}`;

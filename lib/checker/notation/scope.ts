@@ -67,7 +67,7 @@ function partsOf(name: string, asciiLetters: number): NameParts | null {
   const braced = marked && name.charAt(position) === '{';
   if (braced) position += 1;
   let index = '';
-  for (let part = indexPart(name, position); part !== ''; part = indexPart(name, position)) {
+  for (let part = indexPart(name, position, marked); part !== ''; part = indexPart(name, position, marked)) {
     index += part;
     position += 1;
   }
@@ -79,10 +79,12 @@ function partsOf(name: string, asciiLetters: number): NameParts | null {
   return { base: greekLetter(base), index: greekLetter(index), primes };
 }
 
-function indexPart(name: string, position: number): string {
+/** One character of an index; without an index mark only digits and lowered characters make one. */
+function indexPart(name: string, position: number, marked: boolean): string {
   const character = name.charAt(position);
-  if (isDigit(name.charCodeAt(position)) || character === '+' || character === '-') return character;
-  const letter = letterAt(name, position);
+  if (isDigit(name.charCodeAt(position))) return character;
+  if (marked && (character === '+' || character === '-')) return character;
+  const letter = marked ? letterAt(name, position) : '';
   return letter === '' ? (subscriptOf.get(character) ?? '') : letter;
 }
 
