@@ -1,6 +1,7 @@
 /** The decoration `name =` before an answer, and the labels of values. */
 import { type Label } from './answer-tree';
 import { type Cursor } from './cursor';
+import { isSign } from './parse-sign';
 import { nesting } from './starts';
 import { type Token, type TokenKind } from './token';
 
@@ -42,7 +43,7 @@ export function passLeftSide(
   return { from: first + 1, label: labelOf(cursor.tokens, from, first) };
 }
 
-/** A name, a name with its arguments, a bracket such as `[S_x, S_y]`, a ket, or a mean value. */
+/** A name, a name with its arguments or a sign (`E±`), a bracket such as `[S_x, S_y]`, a ket, or a mean value. */
 function isLeftSide(tokens: readonly Token[], from: number, to: number): boolean {
   const first = tokens[from];
   if (first === undefined || to <= from) return false;
@@ -50,7 +51,7 @@ function isLeftSide(tokens: readonly Token[], from: number, to: number): boolean
   if (isName(first)) {
     index += 1;
     while (index < to && isName(tokens[index]) && tokens[index]?.spaced === false) index += 1;
-    if (index === to) return true;
+    if (index === to || (index === to - 1 && isSign(tokens[index]))) return true;
     return tokens[index]?.kind === '(' && closesAt(tokens, index) === to - 1;
   }
   if (first.kind === 'ket' || first.kind === 'bra' || first.kind === 'named-ket') return to === from + 1;
@@ -77,9 +78,11 @@ export function closesAt(tokens: readonly Token[], open: number): number {
 }
 
 function labelOf(tokens: readonly Token[], from: number, to: number): Label | null {
-  const last = tokens[to - 1];
+  const sign = isSign(tokens[to - 1]) ? (tokens[to - 1]?.kind ?? null) : null;
+  const end = sign === null ? to : to - 1;
+  const last = tokens[end - 1];
   if (!isName(last) || last === undefined) return null;
   let base = '';
-  for (let index = from; index < to; index += 1) base += tokens[index]?.text ?? '';
-  return { base, index: last.index };
+  for (let index = from; index < end; index += 1) base += tokens[index]?.text ?? '';
+  return { base, index: last.index ?? sign };
 }

@@ -22,7 +22,7 @@ export function parseFunction(cursor: Cursor, token: Token, name: FunctionName):
     const message = `The inverse of ${name} has no name here.`;
     return cursor.fail('no-inverse-function', span, message, `For 1/${name} write 1/${name}(x).`);
   }
-  const values = called === 'atan2' ? parseArguments(cursor, token, 2) : [parseArgument(cursor)];
+  const values = called === 'atan2' ? parseArguments(cursor, token, 2) : [parseArgument(cursor, false)];
   const span = { start: token.start, end: cursor.previous().end };
   const type = callType(cursor, called, values, span);
   const written = isInverse ? 'inverse' : 'name';
@@ -47,7 +47,7 @@ function callType(
 
 /** `sqrt`, `abs` and `conj` with the same extents as other functions. */
 export function parseWrapper(cursor: Cursor, token: Token, name: 'sqrt' | 'abs' | 'conj'): Expression {
-  const body = parseArgument(cursor);
+  const body = parseArgument(cursor, name === 'sqrt');
   const span = { start: token.start, end: cursor.previous().end };
   if (name === 'conj') {
     if (body.type === 'list' || body.type === 'pairs') {
@@ -61,9 +61,9 @@ export function parseWrapper(cursor: Cursor, token: Token, name: 'sqrt' | 'abs' 
 }
 
 /** argument = `(` sum `)` | `{` sum `}` | `[` … `]` | run */
-function parseArgument(cursor: Cursor): Expression {
+function parseArgument(cursor: Cursor, ofRoot: boolean): Expression {
   const open = cursor.peek();
-  if (open.kind !== '(' && open.kind !== '{' && open.kind !== '[') return parseRun(cursor);
+  if (open.kind !== '(' && open.kind !== '{' && open.kind !== '[') return parseRun(cursor, ofRoot);
   const expected = cursor.stateExpected;
   cursor.stateExpected = false;
   const body = cursor.grammar.primary(cursor);

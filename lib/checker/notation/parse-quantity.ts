@@ -22,6 +22,8 @@ export function unitStart(tokens: readonly Token[]): number {
       depth += 1;
     } else if (token.kind === ')' || token.kind === ']' || token.kind === '}') {
       depth -= 1;
+    } else if (depth === 0 && token.kind === 'frac' && isUnitLetters(tokens[index + 2])) {
+      return beforeJoin(tokens, index);
     } else if (depth === 0 && (token.kind === 'degree' || isUnitLetters(token))) {
       return token.kind === 'degree' && tokens[index - 1]?.kind === '^' ? index - 1 : beforeJoin(tokens, index);
     }
@@ -122,7 +124,7 @@ function firstOf(expressions: readonly Expression[]): Expression | null {
 
 /**
  * unit = [ `*` | `/` ] factor { [ `*` | `/` ] factor }
- * factor = ( name | `(` unit `)` ) [ `^` integer | superscript ]
+ * factor = ( name | `(` unit `)` | `\frac` factor factor ) [ `^` integer | superscript ]
  * After a slash one factor is divided by, as in a product.
  */
 function parseUnit(cursor: Cursor): UnitFactor[] {
@@ -151,6 +153,12 @@ function parseUnitFactor(cursor: Cursor): readonly UnitFactor[] {
     cursor.next();
     const power = unitPower(cursor);
     return inner.map((factor) => ({ ...factor, power: factor.power * power }));
+  }
+  if (token.kind === 'frac') {
+    cursor.next();
+    const top = parseUnitFactor(cursor);
+    const bottom = parseUnitFactor(cursor);
+    return [...top, ...bottom.map((factor) => ({ ...factor, power: -factor.power }))];
   }
   if (token.kind === 'degree' || (token.kind === '^' && cursor.ahead(1).kind === 'degree')) {
     if (token.kind === '^') cursor.next();

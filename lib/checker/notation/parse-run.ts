@@ -12,8 +12,8 @@ import { isLiteralZero } from './typing';
  * The argument of a function without brackets: up to a written product sign, another function, root, exponential, ket,
  * bra, operator, matrix, sum or comma.
  */
-export function parseRun(cursor: Cursor): Expression {
-  if (isSign(cursor.peek())) return parseSigned(cursor, parseRun);
+export function parseRun(cursor: Cursor, ofRoot: boolean): Expression {
+  if (isSign(cursor.peek())) return parseSigned(cursor, (inner) => parseRun(inner, ofRoot));
   const token = cursor.peek();
   if (!startsOperand(token)) {
     return cursor.fail(
@@ -23,10 +23,10 @@ export function parseRun(cursor: Cursor): Expression {
       'Write it in brackets, as in sin(x).',
     );
   }
-  return cursor.takes(choices.shortExtent) ? parseShortRun(cursor) : parseWholeRun(cursor);
+  return cursor.takes(choices.shortExtent) ? parseShortRun(cursor, ofRoot) : parseWholeRun(cursor, ofRoot);
 }
 
-function parseWholeRun(cursor: Cursor): Expression {
+function parseWholeRun(cursor: Cursor, ofRoot: boolean): Expression {
   const first = cursor.grammar.power(cursor);
   const factors: Factor[] = [{ join: 'unwritten', body: first }];
   let last = first;
@@ -45,7 +45,7 @@ function parseWholeRun(cursor: Cursor): Expression {
       continue;
     }
     if (!runGoesOn(cursor, token)) break;
-    doubtful ||= named && setsOff(cursor, token);
+    doubtful ||= ofRoot || (named ? setsOff(cursor, token) : token.kind !== 'word');
     const from = cursor.at;
     refuseNumbers(cursor, last);
     const body = cursor.grammar.power(cursor);
@@ -72,16 +72,16 @@ function parseWholeRun(cursor: Cursor): Expression {
   return productOf(cursor, factors);
 }
 
-/** The other common extent: coefficients and one name, or names without space, and no power. */
-function parseShortRun(cursor: Cursor): Expression {
+/** The other common extent: coefficients and one name, or names without space, and no power. Of a root, one atom. */
+function parseShortRun(cursor: Cursor, ofRoot: boolean): Expression {
   const factors: Factor[] = [];
   for (;;) {
     const token = cursor.peek();
     const body = cursor.grammar.primary(cursor);
     factors.push({ join: 'unwritten', body });
     const next = cursor.peek();
-    const goesOn = token.kind === 'number' ? runGoesOn(cursor, next) : next.kind === 'word' && runGoesOn(cursor, next);
-    if (body.type !== 'scalar' || !goesOn || (token.kind !== 'number' && setsOff(cursor, next))) break;
+    if (ofRoot || body.type !== 'scalar' || next.kind !== 'word' || !runGoesOn(cursor, next)) break;
+    if (token.kind !== 'number' && setsOff(cursor, next)) break;
   }
   return productOf(cursor, factors);
 }

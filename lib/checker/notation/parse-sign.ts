@@ -4,8 +4,8 @@ import { type Token } from './token';
 import { type Expression, type Sign } from './tree';
 
 /** Whether a token is a sign. */
-export function isSign(token: Token): boolean {
-  const { kind } = token;
+export function isSign(token: Token | undefined): boolean {
+  const kind = token?.kind;
   return kind === '+' || kind === '-' || kind === '±' || kind === '∓';
 }
 
