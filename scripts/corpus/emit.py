@@ -31,7 +31,7 @@ class Topic:
 
     # --- the three kinds of line --------------------------------------------------------------------------------------
 
-    def agree(self, kind, ref, *answers, why, n=2, symbols=None, options=None, fix=None, substitute=None, proof=None, form=None, loose=True, modes=MODES, reftext=None):
+    def agree(self, kind, ref, *answers, why, n=2, symbols=None, options=None, fix=None, substitute=None, proof=None, form=None, loose=True, modes=MODES, reftext=None, properties=None):
         """Answers that agree with `ref`: each is written `n` times in different spellings (a hand-written text once)."""
         symbols, options = self.table(symbols, ref, answers), options or {}
         for ans in answers:
@@ -46,9 +46,9 @@ class Topic:
             method = f"SymPy ({', '.join(ways)})" if ways else f"by hand: {proof}"
             source = f"{method}; equal to 55 digits at {good} points of the domain"
             for text in self.spell(ans, kind, n, loose, modes, symbols):
-                self.add("agrees", kind, self.reference(ref, kind, reftext, symbols), text, symbols, options, why=why, source=source, form=form)
+                self.add("agrees", kind, self.reference(ref, kind, reftext, symbols), text, symbols, options, why=why, source=source, form=form, properties=properties)
 
-    def differ(self, kind, ref, *answers, why, n=1, symbols=None, options=None, fix=None, slips=None, pair=None, exactly=False, form=None, modes=MODES, reftext=None, quiet=False):
+    def differ(self, kind, ref, *answers, why, n=1, symbols=None, options=None, fix=None, slips=None, pair=None, exactly=False, form=None, modes=MODES, reftext=None, quiet=False, properties=None):
         """Answers that differ from `ref` at a point of the domain; value slips that fit there are found and added to `slips`."""
         symbols, options = self.table(symbols, ref, answers), options or {}
         for ans in answers:
@@ -60,7 +60,7 @@ class Topic:
             for text in self.spell(ans, kind, n, False, modes, symbols):
                 self.add(
                     "differs", kind, self.reference(ref, kind, reftext, symbols), text, symbols, options, why=why,
-                    source="mpmath, 80 digits: " + shown(witness), slips=in_order(found), pair=pair, exactly=exactly, form=form,
+                    source="mpmath, 80 digits: " + shown(witness), slips=in_order(found), pair=pair, exactly=exactly, form=form, properties=properties,
                 )
 
     def plain(self, verdict, kind, reference, answer, why, source, symbols=None, options=None, slips=None, pair=None, allowed=None, form=None, exactly=False, ambiguous=False):
@@ -109,7 +109,7 @@ class Topic:
                 break
         return out
 
-    def add(self, verdict, kind, reference, answer, symbols, options, why, source, slips=None, pair=None, exactly=False, allowed=None, form=None, ambiguous=False):
+    def add(self, verdict, kind, reference, answer, symbols, options, why, source, slips=None, pair=None, exactly=False, allowed=None, form=None, ambiguous=False, properties=None):
         key = (kind, reference, answer, json.dumps(options, sort_keys=True), json.dumps(symbols, sort_keys=True))
         if key in self.seen:
             return
@@ -124,6 +124,8 @@ class Topic:
         for name, value in (("pair", pair), ("allowed", allowed), ("form", form), ("ambiguous", ambiguous)):
             if value:
                 line[name] = value
+        if properties:
+            line["hermitian"], line["unitary"] = properties
         line["why"], line["source"] = why, source
         self.lines[verdict].append(line)
 
@@ -152,8 +154,8 @@ ORDER = (
 
 
 def in_order(slips):
-    """Slips in the order of the catalogue."""
-    return sorted(slips, key=ORDER.index)
+    """Slips in the order of the catalogue, after those that an author defined."""
+    return sorted(slips, key=lambda s: ORDER.index(s) if s in ORDER else -1)
 
 
 def decorate(text, rng):

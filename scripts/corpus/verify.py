@@ -10,7 +10,8 @@ import sys
 import mpmath
 
 from label import agree_at, environment
-from reader import Reader, unicode_form
+from reader import Reader
+from unicode_form import unicode_form
 from values import Points, evaluate, tag
 
 FOLDER = os.path.join(os.path.dirname(__file__), "..", "..", "tests", "corpus")

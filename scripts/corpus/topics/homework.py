@@ -118,9 +118,9 @@ def spectra():
         m = f"[[{p}, {x}{-y:+d}i], [{x}{y:+d}i, {s}]]"
         root = surd(disc)
         centre = F(p + s, 2)
-        ref = raw(f"eigenvalues({m})", values((p + s + root) / 2 if False else number(centre) + sqrt(q(disc)) / 2, number(centre) - sqrt(q(disc)) / 2))
+        ref = raw(f"eigenvalues({m})", values(number(centre) + sqrt(q(disc)) / 2, number(centre) - sqrt(q(disc)) / 2))
         right = pm(number(centre), root / 2) if centre else pm(None, root / 2)
-        t.agree(K, ref, right, pm(None, 1) if False else values((number(p + s) + sqrt(q(disc))) / 2, (number(p + s) - sqrt(q(disc))) / 2), why="a drawn Hermitian matrix", n=2)
+        t.agree(K, ref, right, values((number(p + s) + sqrt(q(disc))) / 2, (number(p + s) - sqrt(q(disc))) / 2), why="a drawn Hermitian matrix", n=2)
         t.differ(K, ref, pm(number(centre), root) if centre else pm(None, root), why="the half forgotten under the root", n=1)
         if centre:
             t.differ(K, ref, pm(None, root / 2), why="centre left out", n=1)

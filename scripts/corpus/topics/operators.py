@@ -205,7 +205,7 @@ def density():
     D("operator", P("+y"), half() * mat(1, i, -i, 1), why="conjugated and transposed", n=3)
     D("operator", P("+y"), half() * mat(1, 1, 1, 1), half() * mat(1, i, i, 1), why="the wrong axis, or not Hermitian", n=2)
     D("operator", P("+"), mat(0, 0, 0, 1), mat(1, 0, 0, 1), sz, why="the other projector, or no projector", n=2)
-    D("operator", P("+") / 2 + P("+x") / 2, mat(3, 1, 1, 1), mat(half(), q(1, 4), q(1, 4), half()), mat(q(3, 4), q(1, 4), q(-1, 4) if False else -q(1, 4), q(1, 4)), why="normalisation or elements", n=2)
+    D("operator", P("+") / 2 + P("+x") / 2, mat(3, 1, 1, 1), mat(half(), q(1, 4), q(1, 4), half()), mat(q(3, 4), q(1, 4), -q(1, 4), q(1, 4)), why="normalisation or elements", n=2)
     D("operator", P("+") / 2 + P("+x") / 2, half() * (sx / 2 + sz / 2), why="identity left out", slips=["missing-constant"], n=2)
     D("operator", p * P("+") + (1 - p) * P("-"), mat(1 - p, 0, 0, p), mat(p, 0, 0, p), why="weights exchanged or equal", n=2)
     D("operator", rho, half() * mat(1 + rz, rx + i * ry, rx - i * ry, 1 - rz), why="conjugated and transposed", n=2)

@@ -4,7 +4,6 @@ from emit import Topic
 from tree import *
 
 SYMBOLS = {"theta": "real", "phi": "real", "t": "real", "omega": "positive", "omega_0": "positive", "omega_1": "positive", "B": "real", "gamma": "positive", "a": "real", "b": "real", "c": "real", "d": "real", "Delta": "real", "v": "positive", "E_0": "real", "r": {"between": ["0", "1"]}, "p": {"between": ["0", "1"]}, "x": "real", "y": "real", "z": "real", "u": "positive", "tau": "positive"}
-COMPLEX = ("ascii", "uni", "tex", "mix")
 
 
 def pauli():
@@ -88,7 +87,7 @@ def eigenpairs():
     A(K, raw("eigenpairs(sigma_y)", pairs(q(1), ket("+y"), q(-1), ket("-y"))), pairs(q(-1), col(1, -i), q(1), col(1, i)), pairs(q(1), col(1, i) / sqrt(2), q(-1), col(i, 1) / sqrt(2)), why="computed reference", n=3)
     sp_, sm_ = col(cos(th / 2), exp(i * ph) * sin(th / 2)), col(sin(th / 2), -(exp(i * ph) * cos(th / 2)))
     A(K, pairs(q(1), sp_, q(-1), sm_), pairs(q(1), col(exp(-(i * ph / 2)) * cos(th / 2), exp(i * ph / 2) * sin(th / 2)), q(-1), col(-(exp(-(i * ph / 2)) * sin(th / 2)), exp(i * ph / 2) * cos(th / 2))), pairs(q(1), col(1 + cos(th), exp(i * ph) * sin(th)), q(-1), col(1 - cos(th), -(exp(i * ph) * sin(th)))), pairs(q(-1), col(-(exp(-(i * ph)) * sin(th / 2)), cos(th / 2)), q(1), sp_), why="spin along a direction", n=3)
-    A(K, pairs(q(4), col(2, 1 + 2 * i) if False else col(1 - 2 * i, 1), q(-2), col(1, -(1 + 2 * i))), pairs(q(4), col(5, 1 + 2 * i), q(-2), col(-1, 1 + 2 * i)), pairs(q(-2), col(1 - 2 * i, -5), q(4), col(1 - 2 * i, 1)), why="[[3, 1-2i], [1+2i, -1]]", n=3)
+    A(K, pairs(q(4), col(1 - 2 * i, 1), q(-2), col(1, -(1 + 2 * i))), pairs(q(4), col(5, 1 + 2 * i), q(-2), col(-1, 1 + 2 * i)), pairs(q(-2), col(1 - 2 * i, -5), q(4), col(1 - 2 * i, 1)), why="[[3, 1-2i], [1+2i, -1]]", n=3)
     A(K, pairs(q(3), col(1, 1), q(3), col(1, -1)), pairs(q(3), P, q(3), M), pairs(q(3), col(1, 2), q(3), col(i, 1)), why="degenerate: any two independent states", n=3, proof="two independent states span the plane")
     D(K, pairs(q(3), P, q(3), M), pairs(q(3), P, q(3), 2 * P), pairs(q(3), P, q(2), M), pairs(q(3), P + M, q(3), -P - M), why="degenerate, but the states do not span, or a value is wrong", n=2, quiet=True)
     unit = {"requireNormalised": True}

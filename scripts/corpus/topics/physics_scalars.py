@@ -15,7 +15,7 @@ def rabi():
     P = w1**2 / (w1**2 + Dl**2) * sin(sqrt(w1**2 + Dl**2) * tt / 2) ** 2
     A("scalar", P, w1**2 / (Dl**2 + w1**2) * sin(half() * tt * sqrt(Dl**2 + w1**2)) ** 2, w1**2 * sin(tt * W / 2) ** 2 / W2, (w1 / W) ** 2 * sin(W * tt / 2) ** 2, w1**2 / (2 * W2) * (1 - cos(W * tt)), 1 / (1 + (Dl / w1) ** 2) * sin(w1 * tt / 2 * sqrt(1 + Dl**2 / w1**2)) ** 2, 1 - (1 - w1**2 / W2 * sin(W * tt / 2) ** 2), why="Rabi's formula", n=4)
     D("scalar", P, w1**2 / W2 * cos(W * tt / 2) ** 2, why="cosine for sine", slips=["sine-cosine"], n=4)
-    D("scalar", P, w1**2 / W2 * sin(W * tt) ** 2, why="full for half angle", slips=["double-angle"] if False else None, n=3)
+    D("scalar", P, w1**2 / W2 * sin(W * tt) ** 2, why="full for half angle", n=3)
     D("scalar", P, w1 / W * sin(W * tt / 2) ** 2, Dl**2 / W2 * sin(W * tt / 2) ** 2, sin(W * tt / 2) ** 2, w1**2 / W2, w1**2 / W2 * sin(W * tt / 2), w1**2 / W2 * sin(w1 * tt / 2) ** 2, why="a wrong amplitude or frequency", n=3)
     D("scalar", P, w1**2 / W2 * sin(W2 * tt / 2) ** 2, why="square root left out", slips=["missing-root"], n=3)
     D("scalar", P, 1 - w1**2 / W2 * sin(W * tt / 2) ** 2, why="the survival probability", n=3)
@@ -101,7 +101,7 @@ def measurement():
     A("scalar", hbar**2 / 4, br("+", Sx**2, "+"), bra("+") * Sx * Sx * P, absv(br("+", Sx, "-")) ** 2, (hbar / 2) ** 2, why="mean square", n=3)
     A("scalar", hbar, bra("+") * Sp * M, why="matrix element of S_+", n=3)
     D("scalar", -(i * hbar / 2), i * hbar / 2, br("-", Sy, "+"), why="conjugated", n=3)
-    D("scalar", -(i * hbar / 2), hbar / 2, -(hbar / 2), why="i lost", slips=["missing-i"] if False else None, n=2)
+    D("scalar", -(i * hbar / 2), hbar / 2, -(hbar / 2), why="i lost", n=2)
     D("scalar", -(i * hbar / 2), -(i / 2), -(i * hbar), br("+", sy, "-"), why="hbar or a factor", n=2)
     D("scalar", hbar / 2, -(hbar / 2), br("-", Sz, "-"), why="sign", n=2)
     D("scalar", hbar / 2, half(), br("+", sx, "-"), hbar, hbar / 4, hbar**2 / 2, why="hbar or a factor", n=2)

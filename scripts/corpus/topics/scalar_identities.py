@@ -132,7 +132,7 @@ def exponentials():
     d("scalar", sin(w), (exp(-(i * w)) - exp(i * w)) / (2 * i), why="sign", n=2)
     d("scalar", absv(1 + exp(i * th)) ** 2, 2 * cos(th / 2) ** 2, why="half of it", n=2)
     d("scalar", absv(1 + exp(i * th)) ** 2, 2 + 2 * sin(th), why="sine for cosine, in a form the reference does not have", n=2, quiet=True)
-    d("scalar", tanh(x), (exp(x) - 1) / (exp(x) + 1), tanh(x / 2), why="half the argument", slips=["half-angle"] if False else None, n=2)
+    d("scalar", tanh(x), (exp(x) - 1) / (exp(x) + 1), tanh(x / 2), why="half the argument", n=2)
     d("scalar", tanh(x), (exp(-x) - exp(x)) / (exp(x) + exp(-x)), why="sign", n=2)
     d("scalar", cosh(2 * x), cosh(x) ** 2 - sinh(x) ** 2, 2 * cosh(x), why="a wrong identity", n=2)
     d("scalar", exp(x + y), exp(x) + exp(y), exp(x * y), why="a wrong law of exponents", n=2)
