@@ -1,6 +1,6 @@
 """Rewrites the labelled corpus: `/usr/bin/python3 scripts/corpus/make.py [--only topic] [--cache file]`.
 
-`--cache` keeps SymPy's proofs between runs; without it every proof is made anew (some minutes).
+`--cache` keeps SymPy's proofs between runs; without it every proof is made anew (a minute or two).
 """
 
 import argparse
