@@ -46,9 +46,9 @@ const zones = [
     message: 'Pages, actions and routes call services and queries; they touch no model.',
   },
   {
-    target: './app/(student)',
+    target: ['./app/(student)', './app/(tools)/reading'],
     from: './lib/checker',
-    except: ['./reader.ts'],
+    except: ['./reader.ts', './contract.ts'],
     message:
       "Students' pages may import the checker's reader only: comparison and references must not reach a student's browser.",
   },

@@ -19,7 +19,8 @@ export type RouteCall<Who extends Actor = PersonActor> = {
   now: Date;
 };
 
-type RouteContext = { params: Promise<Record<string, string | string[] | undefined>> };
+/** Next gives a route without parameters in its address none. */
+type RouteContext = { params: Promise<Record<string, string | string[] | undefined> | undefined> };
 type RouteHandler = (request: Request, context: RouteContext) => Promise<Response>;
 
 /**
@@ -72,6 +73,6 @@ async function refuseForeign(request: Request): Promise<void> {
 }
 
 async function plainParams(context: RouteContext): Promise<Record<string, string>> {
-  const entries = Object.entries(await context.params).map(([name, value]) => [name, [value].flat().join('/')]);
+  const entries = Object.entries((await context.params) ?? {}).map(([name, value]) => [name, [value].flat().join('/')]);
   return Object.fromEntries(entries) as Record<string, string>;
 }

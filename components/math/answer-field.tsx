@@ -20,6 +20,8 @@ export interface AnswerFieldProps extends Omit<ReadingRequest, 'symbols'> {
   readonly hint?: ReactNode;
   readonly defaultValue?: string;
   readonly disabled?: boolean;
+  /** Stands below an empty field; null for nothing, where several fields of a page would say the same. */
+  readonly empty?: string | null;
   /** Told whenever the reading changes; null for an empty field. */
   readonly onReading?: (reading: ReadingOf | null) => void;
   readonly onTyped?: (text: string) => void;
@@ -42,6 +44,7 @@ export function AnswerField({
   hint,
   defaultValue = '',
   disabled,
+  empty = 'What you type is shown back here as it is read.',
   onReading,
   onTyped,
   read = readAnswer,
@@ -90,7 +93,7 @@ export function AnswerField({
           {hint}
         </p>
       ) : null}
-      <ReadBack reading={reading} stale={stale} />
+      <ReadBack reading={reading} stale={stale} empty={empty ?? undefined} />
       <p id={`${id}-reading`} role="status" aria-live="polite" className="sr-only">
         {spoken}
       </p>

@@ -9,13 +9,13 @@ export interface ReadBackProps {
   readonly reading: ReadingOf | null;
   /** The text has changed since; the reading belongs to an earlier one. */
   readonly stale?: boolean;
+  /** What stands in place of a reading while nothing is typed; nothing where left out. */
+  readonly empty?: string;
 }
 
 /** How an answer was read: typeset as typed, or ∅ with what stands in the way and where. */
-export function ReadBack({ reading, stale = false }: ReadBackProps) {
-  if (!reading) {
-    return <p className="mt-2 text-small text-grey">What you type is shown back here as it is read.</p>;
-  }
+export function ReadBack({ reading, stale = false, empty }: ReadBackProps) {
+  if (!reading) return empty ? <p className="mt-2 text-small text-grey">{empty}</p> : null;
   if (!reading.readable) return <Unreadable reading={reading} />;
   const doubts = reading.diagnostics.filter((diagnostic) => diagnostic.code === 'ambiguous');
   return (

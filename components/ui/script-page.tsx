@@ -50,7 +50,7 @@ export function Section({ id, margin, stickyMargin, label, children }: SectionPr
   );
 }
 
-export interface PartRowProps extends Omit<SectionProps, 'label'> {
+export interface PartRowProps extends SectionProps {
   /** The part's letter, "a". */
   readonly letter: string;
   /** What is asked, beside the letter. */
@@ -58,9 +58,9 @@ export interface PartRowProps extends Omit<SectionProps, 'label'> {
 }
 
 /** The row of one part of a question: letter and prompt, then the working; its marks in the margin. */
-export function PartRow({ letter, prompt, children, ...section }: PartRowProps) {
+export function PartRow({ letter, prompt, children, label = `Part ${letter}`, ...section }: PartRowProps) {
   return (
-    <Section {...section} label={`Part ${letter}`}>
+    <Section {...section} label={label}>
       <div className="flex gap-2">
         <span className="font-semibold">{letter}.</span>
         <div className="min-w-0">{prompt}</div>

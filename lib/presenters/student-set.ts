@@ -62,6 +62,8 @@ export type StudentAnswer = {
   attempt: number;
   receipt: string;
   submittedAt: string;
+  /** Whether the reader could read it; otherwise a person does, and it cost no attempt. */
+  readable: boolean;
   /** Taken in from a file by the course's staff, not typed. */
   byStaff: boolean;
   /** The verdict alone, and only where the set tells it at once; `waiting` until there is one. */
@@ -120,6 +122,10 @@ function presentPart(
   const stands = attempts.find((attempt) => attempt.stands);
   const saved = own.saved.find(isThis);
   const reading = partReadingOf(content, key);
+  const made = attempts.map(({ verdict, text }) => ({
+    verdict,
+    readable: verdict === null ? readAnswer(content, key, text).readable : verdict !== 'unreadable',
+  }));
   const prompt = content.parts.find((part) => part.key === key)?.prompt ?? '';
   return {
     key,
@@ -128,25 +134,22 @@ function presentPart(
     kind: reading.kind,
     reading,
     attemptsAllowed: set.attemptsAllowed,
-    attemptsLeft: attemptsLeft(
-      set.attemptsAllowed,
-      attempts.map(({ verdict, text }) => ({
-        verdict,
-        readable: verdict !== null || readAnswer(content, key, text).readable,
-      })),
-    ),
-    handedIn: stands ? presentAnswer(stands, set.policy.showVerdictAtOnce) : null,
+    attemptsLeft: attemptsLeft(set.attemptsAllowed, made),
+    handedIn: stands
+      ? presentAnswer(stands, made[attempts.indexOf(stands)]?.readable ?? true, set.policy.showVerdictAtOnce)
+      : null,
     unsent: saved && saved.text !== stands?.text ? saved.text : null,
     revision: saved?.revision ?? 0,
   };
 }
 
-function presentAnswer(attempt: AttemptRow, showsVerdict: boolean): StudentAnswer {
+function presentAnswer(attempt: AttemptRow, readable: boolean, showsVerdict: boolean): StudentAnswer {
   return {
     text: attempt.text,
     attempt: attempt.attempt,
     receipt: attempt.receipt,
     submittedAt: attempt.submittedAt.toISOString(),
+    readable,
     byStaff: attempt.source === 'intake',
     verdict: showsVerdict ? (attempt.verdict ?? 'waiting') : null,
   };

@@ -123,6 +123,7 @@ describe('what a student is given', () => {
         attempt: 1,
         receipt: 'ABCD-EFGH-JKLM',
         submittedAt: '2026-12-01T10:00:00.000Z',
+        readable: true,
         byStaff: false,
         verdict: null,
       },

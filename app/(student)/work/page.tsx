@@ -1,7 +1,7 @@
 import { redirect } from 'next/navigation';
 import { SiteHead } from '@/app/_components/page-head';
 import { requireActor } from '@/app/_server/current-actor';
-import { PageTitle, ScriptPage, Section } from '@/components/ui/script-page';
+import { MarginNote, PageTitle, ScriptPage, Section } from '@/components/ui/script-page';
 import { EmptyState } from '@/components/ui/states';
 import { isStaffRole } from '@/lib/domain/roles';
 import { paths } from '@/lib/paths';
@@ -17,13 +17,23 @@ export default async function WorkPage() {
   const roles = [...actor.memberships.values()].map(({ role }) => role);
   if (!roles.includes('student') && roles.some(isStaffRole)) redirect(paths.courses());
   const now = new Date();
-  const work = presentOwnSets(await ownSets(actor.userId, now), now);
+  const rows = await ownSets(actor.userId, now);
+  const work = presentOwnSets(rows, now);
+  const notices = new Map(rows.map((row) => [row.courseCode, row.courseNotice]));
   const isEmpty = Object.values(work).every((lines) => lines.length === 0);
   return (
     <>
       <SiteHead actor={actor} here="work" place="My work" />
       <ScriptPage>
-        <Section>
+        <Section
+          margin={[...notices].map(([code, notice]) =>
+            notice ? (
+              <MarginNote key={code}>
+                {code}: {notice}
+              </MarginNote>
+            ) : null,
+          )}
+        >
           <PageTitle>My work</PageTitle>
           {isEmpty ? (
             <EmptyState title={roles.length === 0 ? 'You are in no course yet' : 'No set is open yet'}>

@@ -10,15 +10,21 @@ import { ChoiceField } from './choice-field';
 import { DraftNotice } from './draft-notice';
 import { answerName, pressValue, revisionName } from './hand-in-form';
 import { HandInNotice } from './hand-in-notice';
-import { hintFor } from './hint-words';
+import { Hint } from './hint';
 import { useDraft, useKeeper } from './keeper-context';
 import { PartMargin } from './part-margin';
 import { type HandInNews } from './use-hand-in';
 
 interface AnswerPartProps {
   readonly drawId: string;
+  /** The question's place in the set. */
+  readonly place: number;
   readonly part: StudentPart;
   readonly prompt: ReactNode;
+  /** For a choice: the choices as they are shown. */
+  readonly choices: readonly ReactNode[];
+  /** Whether to say that what is typed is shown back: once a page is enough. */
+  readonly isFirst: boolean;
   readonly zone: string;
   readonly form: string;
   /** Whether this part is on its way. */
@@ -28,7 +34,19 @@ interface AnswerPartProps {
 }
 
 /** A part that still takes an answer: the field and how it is read, and in the margin what was submitted. */
-export function AnswerPart({ drawId, part, prompt, zone, form, isPending, news, onBack }: AnswerPartProps) {
+export function AnswerPart({
+  drawId,
+  place,
+  part,
+  prompt,
+  choices,
+  isFirst,
+  zone,
+  form,
+  isPending,
+  news,
+  onBack,
+}: AnswerPartProps) {
   const keeper = useKeeper();
   const ref = { drawId, partKey: part.key };
   const draft = useDraft(ref);
@@ -37,7 +55,7 @@ export function AnswerPart({ drawId, part, prompt, zone, form, isPending, news, 
     id: `${form}-${part.key}`,
     name: answerName(part.key),
     form,
-    label: `Answer to part ${part.key}`,
+    label: `Answer to question ${place}, part ${part.key}`,
     defaultValue: draft.text,
     onTyped: (text: string) => keeper.type(ref, text),
   };
@@ -56,6 +74,7 @@ export function AnswerPart({ drawId, part, prompt, zone, form, isPending, news, 
     <PartRow
       id={`${form}-part-${part.key}`}
       letter={part.key}
+      label={`Question ${place}, part ${part.key}`}
       prompt={prompt}
       margin={
         <PartMargin part={part} zone={zone}>
@@ -66,9 +85,16 @@ export function AnswerPart({ drawId, part, prompt, zone, form, isPending, news, 
     >
       <input type="hidden" form={form} name={revisionName(part.key)} value={part.revision} />
       {part.kind === 'choice' ? (
-        <ChoiceField key={draft.renewed} {...field} choices={part.reading.options.choices ?? []} />
+        <ChoiceField key={draft.renewed} {...field} choices={part.reading.options.choices ?? []} shown={choices} />
       ) : (
-        <AnswerField key={draft.renewed} {...field} {...part.reading} hint={hintFor(part.reading)} read={read} />
+        <AnswerField
+          key={draft.renewed}
+          {...field}
+          {...part.reading}
+          hint={<Hint reading={part.reading} />}
+          {...(isFirst ? {} : { empty: null })}
+          read={read}
+        />
       )}
       {part.handedIn && isNew ? (
         <p className="mt-2 text-small text-grey">

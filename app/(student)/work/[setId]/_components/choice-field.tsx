@@ -1,15 +1,19 @@
+import { type ReactNode } from 'react';
+
 interface ChoiceFieldProps {
   readonly id: string;
   readonly name: string;
   readonly form: string;
   readonly label: string;
   readonly choices: readonly string[];
+  /** The choices as they are shown, in the same order. */
+  readonly shown: readonly ReactNode[];
   readonly defaultValue: string;
   readonly onTyped: (text: string) => void;
 }
 
 /** The answer field of a part that asks for one of several choices. */
-export function ChoiceField({ id, name, form, label, choices, defaultValue, onTyped }: ChoiceFieldProps) {
+export function ChoiceField({ id, name, form, label, choices, shown, defaultValue, onTyped }: ChoiceFieldProps) {
   return (
     <fieldset className="grid gap-2">
       <legend className="sr-only">{label}</legend>
@@ -25,7 +29,7 @@ export function ChoiceField({ id, name, form, label, choices, defaultValue, onTy
             onChange={() => onTyped(choice)}
             className="h-[1.125rem] w-[1.125rem] translate-y-0.5 accent-blue"
           />
-          {choice}
+          <span>{shown[index] ?? choice}</span>
         </label>
       ))}
     </fieldset>

@@ -32,7 +32,12 @@ export function ClosedSet({ set }: { set: StudentSet }) {
           <QuestionHead question={question} of={set.questions.length} />
         </Section>,
         ...question.parts.map((part) => (
-          <ShownPart key={`${question.drawId}-${part.key}`} part={part} zone={set.course.timeZone} />
+          <ShownPart
+            key={`${question.drawId}-${part.key}`}
+            place={question.place}
+            part={part}
+            zone={set.course.timeZone}
+          />
         )),
       ])}
     </ScriptPage>

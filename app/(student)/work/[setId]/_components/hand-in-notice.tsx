@@ -51,6 +51,7 @@ function Ask({ news, form, onBack }: { news: Extract<HandInNews, { kind: 'ask' }
       <Button onClick={onBack}>Mend {many ? 'them' : 'it'}</Button>
       <Button
         look="plain"
+        className="text-start"
         type="submit"
         form={form}
         name="press"

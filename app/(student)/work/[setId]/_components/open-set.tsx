@@ -26,10 +26,16 @@ export function OpenSet({ set }: { set: StudentSet }) {
           prompts={Object.fromEntries(
             question.parts.map(({ key, prompt }) => [key, <Markdown key={key} source={prompt} inline />]),
           )}
+          choices={Object.fromEntries(
+            question.parts.map(({ key, reading }) => [
+              key,
+              (reading.options.choices ?? []).map((choice) => <Markdown key={choice} source={choice} inline />),
+            ]),
+          )}
           locked={Object.fromEntries(
             question.parts
               .filter((part) => part.attemptsLeft === 0)
-              .map((part) => [part.key, <ShownPart key={part.key} part={part} zone={zone} />]),
+              .map((part) => [part.key, <ShownPart key={part.key} place={question.place} part={part} zone={zone} />]),
           )}
           formKey={randomUUID()}
         />

@@ -33,6 +33,7 @@ export function PartMargin({ part, zone, nothing = 'not submitted', children }: 
         ) : (
           <p>{nothing}</p>
         )}
+        {handedIn && !handedIn.readable ? <p>a person will read it; it cost no attempt</p> : null}
         <p>
           attempt {used} of {attemptsAllowed}
           {attemptsLeft === 0 ? ', none left' : null}

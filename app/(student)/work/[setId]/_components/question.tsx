@@ -21,6 +21,8 @@ interface QuestionProps {
   readonly headMargin: ReactNode;
   /** Prompts of the parts, by their letter. */
   readonly prompts: Readonly<Record<string, ReactNode>>;
+  /** Choices of the parts that are one, by their letter. */
+  readonly choices: Readonly<Record<string, readonly ReactNode[]>>;
   /** Rows of the parts without attempts left, by their letter: they are only shown. */
   readonly locked: Readonly<Record<string, ReactNode>>;
   /** Makes the bare form's hand-in one of its kind. */
@@ -28,7 +30,7 @@ interface QuestionProps {
 }
 
 /** One question of an open set: its parts with their fields, each submitted alone or all at once. */
-export function Question({ question, zone, head, headMargin, prompts, locked, formKey }: QuestionProps) {
+export function Question({ question, zone, head, headMargin, prompts, choices, locked, formKey }: QuestionProps) {
   const { drawId, place } = question;
   const form = `question-${place}`;
   const parts = question.parts.filter(({ key }) => locked[key] === undefined);
@@ -89,8 +91,11 @@ export function Question({ question, zone, head, headMargin, prompts, locked, fo
             <AnswerPart
               key={part.key}
               drawId={drawId}
+              place={place}
               part={part}
               prompt={prompts[part.key]}
+              choices={choices[part.key] ?? []}
+              isFirst={place === 1 && part === parts[0]}
               zone={zone}
               form={form}
               isPending={handIn.pressed === part.key}

@@ -7,7 +7,7 @@ import { useKeeper } from './keeper-context';
 const words: Record<Exclude<DraftState, 'clean'>, string> = {
   typing: 'saving',
   sending: 'saving',
-  held: 'no connection; kept in this browser',
+  held: 'not saved yet; kept in this browser',
   'signed-out': 'signed out; kept in this browser',
   stuck: 'not saved; kept in this browser',
   changed: 'changed elsewhere; see below',

@@ -5,6 +5,8 @@ import { PartMargin } from './part-margin';
 import { SubmittedAnswer } from './submitted-answer';
 
 interface ShownPartProps {
+  /** The question's place in the set. */
+  readonly place: number;
   readonly part: StudentPart;
   readonly zone: string;
   /** Why nothing can be typed here, where that needs saying. */
@@ -12,10 +14,11 @@ interface ShownPartProps {
 }
 
 /** A part that takes no more answers: one's own answer, and what was typed and never submitted. */
-export function ShownPart({ part, zone, why }: ShownPartProps) {
+export function ShownPart({ place, part, zone, why }: ShownPartProps) {
   return (
     <PartRow
       letter={part.key}
+      label={`Question ${place}, part ${part.key}`}
       prompt={<Markdown source={part.prompt} inline />}
       margin={<PartMargin part={part} zone={zone} nothing="nothing was submitted" />}
     >
