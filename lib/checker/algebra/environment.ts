@@ -22,7 +22,7 @@ export interface Declarations {
 
 /** The graph of one check with its symbols: created when first met, real variables in the order of first use. */
 export class Environment implements Lowering {
-  readonly g = new Graph();
+  readonly g = Graph.acquire();
   readonly hbar: Node;
   plusMinus: 1 | -1 = 1;
   /** Conditions that sample points must meet. */

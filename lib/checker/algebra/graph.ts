@@ -72,11 +72,57 @@ export class Graph {
   readonly zero: Node;
   readonly one: Node;
   readonly i: Node;
+  private readonly buffers: Float64Array<ArrayBuffer>[] = [];
+  private buffersUsed = 0;
 
-  constructor() {
+  /** An empty graph; its storage may have served an earlier check. */
+  static acquire(): Graph {
+    const graph = spare ?? new Graph();
+    spare = null;
+    return graph;
+  }
+
+  /** Empties a graph that is no longer needed and keeps its storage for the next check. */
+  static release(graph: Graph): void {
+    if (graph.size > RETAINED_NODES || graph.buffers.length > RETAINED_BUFFERS) return;
+    graph.clear();
+    spare = graph;
+  }
+
+  private constructor() {
     this.zero = this.number(ZERO);
     this.one = this.number(ONE);
     this.i = this.node(Op.I, 0, 0, Flag.Imaginary | Flag.NonZero);
+  }
+
+  /** Scratch numbers, at least `size` of them, of any content; they belong to the caller until the graph is released. */
+  buffer(size: number): Float64Array<ArrayBuffer> {
+    const known = this.buffers[this.buffersUsed];
+    if (known && known.length >= size) {
+      this.buffersUsed++;
+      return known;
+    }
+    const fresh = new Float64Array(Math.max(256, size));
+    this.buffers[this.buffersUsed++] = fresh;
+    return fresh;
+  }
+
+  private clear(): void {
+    this.size = 0;
+    this.numbers.length = 0;
+    this.variables.length = 0;
+    this.solved.clear();
+    this.squares.clear();
+    this.memo.clear();
+    this.numberNodes.clear();
+    this.smallNodes.length = 0;
+    this.table.fill(0);
+    this.buffersUsed = 0;
+    this.stepsLeft = DEFAULT_BUDGET;
+    // The three constants are the first nodes of every graph, so their fields keep their values.
+    this.number(ZERO);
+    this.number(ONE);
+    this.node(Op.I, 0, 0, Flag.Imaginary | Flag.NonZero);
   }
 
   /** Takes `steps` from the work limit. */
@@ -187,6 +233,11 @@ export class Graph {
     this.flags = enlarge(this.flags, new Uint8Array(size));
   }
 }
+
+/** Larger storage than this is let go after a check. */
+const RETAINED_NODES = 8192;
+const RETAINED_BUFFERS = 64;
+let spare: Graph | null = null;
 
 /** Largest exponent a Power node may carry. */
 export const MAXIMUM_EXPONENT = 1_000_000;

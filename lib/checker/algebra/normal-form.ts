@@ -58,6 +58,9 @@ const expandIn =
   (atom: Node): Polynomial | null => {
     switch (g.op[atom]) {
       case Op.Add:
+      case Op.Multiply:
+      case Op.Sin:
+      case Op.Cos:
         return toPolynomial(g, atom);
       case Op.Abs: {
         const inside = toPolynomial(g, g.a[atom]!);

@@ -190,14 +190,17 @@ export function reduce(g: Graph, powers: readonly Power[], expand: Expand): Poly
       }
       case Op.Abs:
       case Op.Symbol:
-      case Op.Add: {
+      case Op.Add:
+      case Op.Multiply:
+      case Op.Sin:
+      case Op.Cos: {
         if (exponent.big) throw new TooLarge();
-        const step = g.op[atom] === Op.Add ? 1 : 2;
+        const step = g.op[atom] === Op.Abs || g.op[atom] === Op.Symbol ? 2 : 1;
         const whole = Math.floor(exponent.n / exponent.d / step) * step;
         const base = whole >= step ? expand(atom) : null;
         if (!base) kept.push(power);
         else {
-          // The base of a variable or absolute value stands for its square, that of a sum for the sum itself.
+          // The base of a variable or absolute value stands for its square, any other for the atom itself.
           (pending ??= []).push(toPower(g, base, whole / step, expand));
           const rest = subtractRational(exponent, rational(whole));
           if (!isZero(rest)) kept.push({ atom, exponent: rest });

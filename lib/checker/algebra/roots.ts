@@ -1,7 +1,7 @@
 import { contentOf } from './content';
 import { Flag, type Graph, type Node, Op, POSITIVE } from './graph';
 import { expandIn, fromPolynomial, isRealPolynomial, monomialNode, normalForm } from './normal-form';
-import { fromMonomial, type Polynomial, type Power, times, TooLarge } from './polynomial';
+import { fromAtom, fromMonomial, type Polynomial, type Power, scaled, times, TooLarge } from './polynomial';
 import {
   compareRational,
   equalRational,
@@ -54,9 +54,8 @@ function rootOfForm(g: Graph, form: Polynomial, q: number, anyBranch: boolean): 
     inside = multiply(g, inside, drawn.inside);
   }
   if (rest) {
-    const primitive = q === 2 ? squareRootOfPolynomial(g, rest) : null;
-    if (primitive && (anyBranch || isRealPolynomial(g, primitive))) {
-      const node = fromPolynomial(g, primitive);
+    const node = q === 2 ? realSquareRoot(g, rest, anyBranch) : null;
+    if (node !== null) {
       outside = multiply(g, outside, anyBranch ? node : absolute(g, node));
     } else {
       inside = multiply(g, inside, canonicalFactor(g, rest));
@@ -79,6 +78,17 @@ function rootOfForm(g: Graph, form: Polynomial, q: number, anyBranch: boolean): 
     return multiply(g, multiply(g, turn, total), inside === g.one ? g.one : canonicalRoot(g, inside, q));
   }
   return multiply(g, total, canonicalRoot(g, negate(g, inside), q));
+}
+
+/** A node whose square is the form: a real one, or any with `anyBranch`; null where there is none in the same atoms. */
+function realSquareRoot(g: Graph, form: Polynomial, anyBranch: boolean): Node | null {
+  const direct = squareRootOfPolynomial(g, form);
+  if (direct && (anyBranch || isRealPolynomial(g, direct))) return fromPolynomial(g, direct);
+  // −form may be a square where the form is that of an odd function of phases, as 2 − e^{2iθ} − e^{−2iθ} = (2 sin θ)².
+  const turned = squareRootOfPolynomial(g, scaled(form, rational(-1)));
+  if (!turned) return null;
+  const root = times(g, turned, fromAtom(g.i), expandIn(g));
+  return anyBranch || isRealPolynomial(g, root) ? fromPolynomial(g, root) : null;
 }
 
 /** Sums stay expanded in the radicand, so that the same function is the same node however it was factored. */
@@ -231,7 +241,10 @@ export function ln(g: Graph, x: Node): Node {
   if (turn) return scale(g, turn, multiply(g, g.i, pi(g)));
   const { content, common, rest } = factorsOf(g, form);
   const positive = common.every(
-    ({ atom }) => g.has(atom, Flag.NonNegative) || (g.op[atom] === Op.Exp && g.has(g.a[atom]!, Flag.Real)),
+    ({ atom, exponent }) =>
+      g.has(atom, Flag.NonNegative) ||
+      (g.op[atom] === Op.Exp && g.has(g.a[atom]!, Flag.Real)) ||
+      (g.has(atom, Flag.Real) && isEven(exponent)),
   );
   const restNode = rest ? canonicalFactor(g, rest) : null;
   if (!positive || (restNode !== null && signOf(g, restNode) <= 0 && common.length > 0)) {
@@ -241,7 +254,7 @@ export function ln(g: Graph, x: Node): Node {
   let total = lnOfRational(g, isNegative(content) ? negateRational(content) : content);
   if (isNegative(content)) total = add(g, total, multiply(g, g.i, pi(g)));
   for (const { atom, exponent } of common) {
-    const single = g.op[atom] === Op.Exp ? g.a[atom]! : g.node(Op.Ln, atom, 0, Flag.Real);
+    const single = g.op[atom] === Op.Exp ? g.a[atom]! : g.node(Op.Ln, absolute(g, atom), 0, Flag.Real);
     total = add(g, total, scale(g, exponent, single));
   }
   return restNode === null ? total : add(g, total, g.node(Op.Ln, restNode, 0, Flag.Real));
@@ -269,6 +282,8 @@ function equalForms(p: Polynomial, q: Polynomial): boolean {
   }
   return true;
 }
+
+const isEven = (x: Rational): boolean => !x.big && x.d === 1 && x.n % 2 === 0;
 
 const realLog = (g: Graph, x: Node): number => (g.has(x, Flag.NonNegative) ? Flag.Real : 0);
 

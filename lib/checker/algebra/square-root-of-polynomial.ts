@@ -32,7 +32,9 @@ const MOST_TERMS = 8;
  * The schoolbook method on terms in lexicographic order; the result is checked by squaring it.
  */
 export function squareRootOfPolynomial(g: Graph, p: Polynomial): Polynomial | null {
-  if (p.size < 2 || p.size > (MOST_TERMS * (MOST_TERMS + 1)) / 2) return null;
+  // The square of n terms in order has at least 2n − 1.
+  if (p.size < 3 || p.size > (MOST_TERMS * (MOST_TERMS + 1)) / 2) return null;
+  const mostTerms = Math.min(MOST_TERMS, (p.size + 1) / 2);
   const expand = expandIn(g);
   const leading = leadingTerm(p);
   const c = exactSquareRoot(leading.coefficient);
@@ -42,7 +44,7 @@ export function squareRootOfPolynomial(g: Graph, p: Polynomial): Polynomial | nu
   let rest = minus(p, times(g, root, root, expand));
   const inverse = invertRational(multiplyRational(rational(2), c));
   const inverseMonomial = lead.monomial.map(({ atom, exponent }) => ({ atom, exponent: negateRational(exponent) }));
-  for (let k = 1; k < MOST_TERMS && rest.size > 0; k++) {
+  for (let k = 1; k < mostTerms && rest.size > 0; k++) {
     const next = leadingTerm(rest);
     const quotient = reduce(g, mergeSorted(next.monomial, inverseMonomial), expand);
     if (quotient.size !== 1) return null;

@@ -20,12 +20,21 @@ export type Decision =
   | { readonly status: 'different'; readonly point: NumericPoint; readonly pair: number; readonly precise: boolean }
   | { readonly status: 'undecided'; readonly reason: string };
 
+const NO_POINT = 'no point was found at which both sides are defined';
 const FIRST_POINTS = 2;
 const SEARCH_POINTS = 48;
 /** A difference this many times its error bound is beyond rounding. */
 const MARGIN = 4;
 
 export function decideEqual(g: Graph, pairs: readonly Pair[], points: SamplePoints, seed: number): Decision {
+  const decision = decideDirectly(g, pairs, points, seed);
+  if (decision.status !== 'undecided') return decision;
+  const open = pairs.filter(([x, y]) => x !== y);
+  const proof = sameByExponential(g, open, points, (others) => decideDirectly(g, others, points, seed));
+  return proof ? { status: 'equal', test: 'modular and numeric', proof } : decision;
+}
+
+function decideDirectly(g: Graph, pairs: readonly Pair[], points: SamplePoints, seed: number): Decision {
   const open = pairs.filter(([x, y]) => x !== y);
   if (open.length === 0) {
     return { status: 'equal', test: 'normal form', proof: { bound: 0, fields: 0, degree: 0, branches: 1, points: 0 } };
@@ -35,9 +44,9 @@ export function decideEqual(g: Graph, pairs: readonly Pair[], points: SamplePoin
   if (early) return early;
   const outcome = modularTest(g, open, seed);
   if (outcome.status === 'zero') {
-    if (search.usable === 0 && !search.upTo(1, SEARCH_POINTS) && search.usable === 0) {
-      return { status: 'undecided', reason: 'no point was found at which both sides are defined' };
-    }
+    const late = search.usable === 0 ? search.upTo(1, SEARCH_POINTS) : null;
+    if (late) return late;
+    if (search.usable === 0) return { status: 'undecided', reason: NO_POINT };
     return { status: 'equal', test: 'modular', proof: { ...proofOf(outcome), points: search.usable } };
   }
   const found = search.upTo(SEARCH_POINTS, SEARCH_POINTS);
@@ -52,10 +61,6 @@ export function decideEqual(g: Graph, pairs: readonly Pair[], points: SamplePoin
       if (x !== y && highPrecisionDifference(point, x, y))
         return { status: 'different', point, pair: j, precise: true };
     }
-  }
-  const exponential = sameByExponential(g, open, points, seed);
-  if (exponential && search.usable > 0) {
-    return { status: 'equal', test: 'modular and numeric', proof: { ...exponential, points: search.usable } };
   }
   const reason =
     outcome.status === 'failed' ? outcome.reason : 'the exact test and the numeric values do not settle it';

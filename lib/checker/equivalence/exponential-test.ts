@@ -1,6 +1,6 @@
-import { type Graph } from '../algebra/graph';
+import { type Graph, type Node } from '../algebra/graph';
 import { exp, multiply, subtract } from '../algebra/scalars';
-import { modularTest } from './modular';
+import { type Decision } from './decide';
 import { type Proof } from './proof';
 import { type SamplePoints } from './sample-points';
 import { type Pair } from './size-bound';
@@ -14,24 +14,25 @@ export function sameByExponential(
   g: Graph,
   pairs: readonly Pair[],
   points: SamplePoints,
-  seed: number,
-): Omit<Proof, 'points'> | null {
-  let weakest: Omit<Proof, 'points'> | null = null;
+  decide: (pairs: readonly Pair[]) => Decision,
+): Proof | null {
+  let weakest: Proof | null = null;
   for (const [x, y] of pairs) {
     const difference = subtract(g, x, y);
-    const turned = multiply(g, g.i, difference);
-    const outcome = [
-      modularTest(g, [[exp(g, difference), g.one]], seed),
-      modularTest(g, [[exp(g, turned), g.one]], seed),
-    ].find((o) => o.status === 'zero');
-    if (outcome?.status !== 'zero') return null;
-    if (!smallEverywhere(g, difference, points)) return null;
-    if (!weakest || outcome.bound > weakest.bound) weakest = outcome;
+    if (!smallEverywhere(difference, points)) return null;
+    const proof = proofOfOne(exp(g, multiply(g, g.i, difference))) ?? proofOfOne(exp(g, difference));
+    if (!proof) return null;
+    if (!weakest || proof.bound > weakest.bound) weakest = proof;
   }
   return weakest;
+
+  function proofOfOne(exponential: Node): Proof | null {
+    const decision = decide([[exponential, g.one]]);
+    return decision.status === 'equal' ? decision.proof : null;
+  }
 }
 
-function smallEverywhere(g: Graph, node: number, points: SamplePoints): boolean {
+function smallEverywhere(node: Node, points: SamplePoints): boolean {
   let seen = 0;
   for (let k = 0; k < 24; k++) {
     const point = points.at(k);

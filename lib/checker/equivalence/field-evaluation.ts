@@ -29,7 +29,7 @@ export class FieldEvaluation {
     private readonly plan: Plan,
   ) {
     const last = plan.nodes[plan.nodes.length - 1] ?? 0;
-    this.residues = new Float64Array(last + 1);
+    this.residues = g.buffer(last + 1);
     this.variables = new Float64Array(g.variables.length);
     this.kernels = new Float64Array(plan.kernelCount);
   }

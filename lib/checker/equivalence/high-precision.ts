@@ -20,16 +20,16 @@ import {
 import { type NumericPoint } from './numeric';
 
 /** Figures carried in the two evaluations; what is rounding in one changes in the other. */
-const PRECISIONS = [60, 85] as const;
+const PRECISIONS = [100, 130] as const;
 /** Agreement to this many figures of the largest value met is no difference. */
-const TRUSTED_FIGURES = 45;
+const TRUSTED_FIGURES = 80;
 /** Steps charged to the work limit for one node. */
 const STEP_COST = 4000;
 /** An imaginary part this small beside a negative real one leaves the side of a branch cut open. */
 const ON_CUT = 1e-40;
 
 /**
- * Whether two nodes differ, at the point of the double evaluation, in the first 45 figures of what enters them, by the
+ * Whether two nodes differ, at the point of the double evaluation, in the first 80 figures of what enters them, by the
  * same amount at two precisions.
  */
 export function highPrecisionDifference(point: NumericPoint, x: Node, y: Node): boolean {

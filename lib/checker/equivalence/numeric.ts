@@ -9,9 +9,9 @@ const U = 2.3e-16;
  * analysis (Wilkinson 1963; Higham 2002, §3.3). NaN where a node is undefined or its value cannot be trusted.
  */
 export class NumericPoint {
-  re = new Float64Array(256);
-  im = new Float64Array(256);
-  error = new Float64Array(256);
+  re: Float64Array<ArrayBuffer>;
+  im: Float64Array<ArrayBuffer>;
+  error: Float64Array<ArrayBuffer>;
   private done = 0;
   /** Roots and absolute values whose sign is turned, to look at other branches; null for the principal ones. */
   flipped: ReadonlySet<Node> | null = null;
@@ -20,7 +20,12 @@ export class NumericPoint {
     readonly graph: Graph,
     /** Value of each variable, by index; the sign of one that an assumption determines up to its sign. */
     readonly values: Float64Array,
-  ) {}
+  ) {
+    const size = graph.op.length;
+    this.re = graph.buffer(size);
+    this.im = graph.buffer(size);
+    this.error = graph.buffer(size);
+  }
 
   /** The same point, to be evaluated anew. */
   copy(): NumericPoint {
@@ -212,7 +217,7 @@ export class NumericPoint {
 
   private enlarge(size: number): void {
     const grow = (from: Float64Array): Float64Array<ArrayBuffer> => {
-      const into = new Float64Array(size);
+      const into = this.graph.buffer(size);
       into.set(from);
       return into;
     };

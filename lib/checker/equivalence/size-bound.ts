@@ -22,10 +22,10 @@ export interface SizeBound {
 export function sizeBound(g: Graph, plan: Plan, pairs: readonly Pair[]): SizeBound {
   const count = plan.nodes.length;
   const place = new Int32Array((plan.nodes[count - 1] ?? 0) + 1);
-  const degreeN = new Float64Array(count);
-  const degreeD = new Float64Array(count);
-  const bitsN = new Float64Array(count);
-  const bitsD = new Float64Array(count);
+  const degreeN = g.buffer(count).fill(0, 0, count);
+  const degreeD = g.buffer(count).fill(0, 0, count);
+  const bitsN = g.buffer(count).fill(0, 0, count);
+  const bitsD = g.buffer(count).fill(0, 0, count);
   let constants = 1;
   let roots = 0;
   for (let k = 0; k < count; k++) {

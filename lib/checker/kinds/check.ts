@@ -1,3 +1,4 @@
+import { Graph } from '../algebra/graph';
 import { type CheckOutcome, type CheckRequest, type CheckResponse, type Evidence } from '../contract';
 import { type Diagnostic } from '../diagnostics';
 import { seedOf } from '../equivalence/random';
@@ -61,17 +62,30 @@ function decideExpression(request: CheckRequest): Answered | { error: string } {
   }
   const answer = parse(request.answer, readingContext(request, false));
   const context = prepare(request.symbols, request.options, seedOf(request.kind, request.reference, request.answer));
-  if (request.kind === 'quantity') return decideQuantity(request, context, reference.tree, answer);
+  try {
+    return decideIn(request, context, reference.tree, answer);
+  } finally {
+    Graph.release(context.environment.g);
+  }
+}
+
+function decideIn(
+  request: CheckRequest,
+  context: Context,
+  referenceTree: AnswerTree,
+  answer: ParseResult,
+): Answered | { error: string } {
+  if (request.kind === 'quantity') return decideQuantity(request, context, referenceTree, answer);
   let wanted: AnswerValue;
   try {
-    wanted = answerValue(context.environment, request.kind, reference.tree);
+    wanted = answerValue(context.environment, request.kind, referenceTree);
   } catch (error) {
     return { error: `The reference has no value: ${failureOf(error).message}.` };
   }
   const refused = refuseReference(request, context, wanted);
   if (refused !== null) return { error: refused };
   if (!answer.tree) return unreadable(request.answer, answer.diagnostics[0]);
-  return decideAnswer(request, context, reference.tree, wanted, answer, answer.tree);
+  return decideAnswer(request, context, referenceTree, wanted, answer, answer.tree);
 }
 
 function refuseReference(request: CheckRequest, context: Context, wanted: AnswerValue): string | null {
@@ -139,16 +153,9 @@ function explain(
   let slips: readonly string[] = [];
   try {
     const compare = (x: AnswerValue, y: AnswerValue): boolean => compareTo(context, x, y).verdict === 'agrees';
-    slips = findSlips({
-      request,
-      context,
-      referenceTree,
-      reference: wanted,
-      answerTree: tree,
-      answer: given,
-      compare,
-      point: compared.point,
-    });
+    const point = compared.point ?? context.points.at(0);
+    const trial = { request, context, referenceTree, reference: wanted, answerTree: tree, answer: given, compare };
+    if (point) slips = findSlips({ ...trial, point });
     return { slips, kinKey: kinKeyOf(context, wanted, given, slips, compare) };
   } catch (error) {
     failureOf(error);

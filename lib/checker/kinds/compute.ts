@@ -1,3 +1,4 @@
+import { Graph } from '../algebra/graph';
 import { complexity } from '../algebra/to-tree';
 import { printText } from '../algebra/print-text';
 import { type AnswerKind, type CheckOptions, type Computed, type ComputeError, type SymbolTable } from '../contract';
@@ -34,8 +35,12 @@ export function computeReference(request: ComputeRequest): Computed | ComputeErr
   }
   try {
     const context = prepare(symbols, options, seedOf(kind, reference));
-    const normal = normalTree(context, answerValue(context.environment, kind, tree));
-    return { ok: true, latex: printLatex(normal), text: textOf(normal), complexity: complexityOf(normal) };
+    try {
+      const normal = normalTree(context, answerValue(context.environment, kind, tree));
+      return { ok: true, latex: printLatex(normal), text: textOf(normal), complexity: complexityOf(normal) };
+    } finally {
+      Graph.release(context.environment.g);
+    }
   } catch (error) {
     if (error instanceof BadRequest) return { ok: false, error: error.message };
     return { ok: false, error: `The reference has no value: ${failureOf(error).message}.` };

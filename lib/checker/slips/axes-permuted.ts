@@ -1,8 +1,11 @@
 import { fromPauli, pauliCoefficients } from '../algebra/operators';
-import { type ValueSlip } from './slip';
+import { type Trial, type ValueSlip } from './slip';
+import { looksEqual, valuesOf } from './numeric-match';
+
+type Order = readonly [number, number, number];
 
 /** The five permutations of (x, y, z) that are not the identity. */
-const permutations: readonly (readonly [number, number, number])[] = [
+const permutations: readonly Order[] = [
   [1, 0, 2],
   [2, 1, 0],
   [0, 2, 1],
@@ -15,17 +18,40 @@ export const axesPermuted: ValueSlip = {
   type: 'value',
   id: 'axes-permuted',
   sentence: 'the axes x, y and z are permuted',
-  change: (value, { context }) => {
-    const { g } = context.environment;
+  change: (value, trial) => {
+    const { g } = trial.context.environment;
+    const { answer } = trial;
     if (value.kind === 'vector') {
+      if (answer.kind !== 'vector') return [];
       const { components } = value;
-      return permutations.map((order) => ({ kind: 'vector', components: order.map((k) => components[k]!) }));
+      const orders = fitting(trial, components, answer.components);
+      return orders.map((order) => ({ kind: 'vector', components: order.map((k) => components[k]!) }));
     }
     if (value.kind !== 'operator' && value.kind !== 'pauli') return [];
+    if (answer.kind !== 'operator' && answer.kind !== 'pauli') return [];
     const [a0, ...axes] = pauliCoefficients(g, value.matrix);
-    return permutations.map(([x, y, z]) => ({
+    const [, ...given] = pauliCoefficients(g, answer.matrix);
+    return fitting(trial, axes, given).map(([x, y, z]) => ({
       kind: value.kind,
       matrix: fromPauli(g, [a0, axes[x]!, axes[y]!, axes[z]!]),
     }));
   },
 };
+
+/** The permutations that look right at the trial's point; of operators up to a phase all. */
+function fitting({ point, context }: Trial, wanted: readonly number[], given: readonly number[]): readonly Order[] {
+  if (context.options.upToPhase || context.options.tolerance) return permutations;
+  point.evaluate(Math.max(...wanted, ...given));
+  const answer = valuesOf(point, given);
+  return permutations.filter((order) =>
+    looksEqual(
+      'vector',
+      {},
+      valuesOf(
+        point,
+        order.map((k) => wanted[k]!),
+      ),
+      answer,
+    ),
+  );
+}

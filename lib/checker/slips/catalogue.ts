@@ -7,8 +7,8 @@ import { factorHalf } from './factor-half';
 import { factorTwo } from './factor-two';
 import { hbarPower } from './hbar-power';
 import { missingConstant } from './missing-constant';
-import { extraI, missingI } from './missing-i';
-import { missingRoot } from './missing-root';
+import { extraI, missingI, missingIInTree } from './missing-i';
+import { missingRoot, missingRootInTree } from './missing-root';
 import { missingTwoPi } from './missing-two-pi';
 import { notNormalised } from './not-normalised';
 import { oneEigenvalue } from './one-eigenvalue';
@@ -30,6 +30,7 @@ export const catalogue: readonly Slip[] = [
   factorTwo,
   hbarPower,
   missingI,
+  missingIInTree,
   extraI,
   conjugated,
   transposed,
@@ -42,6 +43,7 @@ export const catalogue: readonly Slip[] = [
   roundedDecimal,
   axesPermuted,
   missingRoot,
+  missingRootInTree,
   missingConstant,
   oneEigenvalue,
   centredEigenvalues,

@@ -1,14 +1,17 @@
 import { adjoint, trace } from '../algebra/operators';
-import { add, negate } from '../algebra/scalars';
+import { add } from '../algebra/scalars';
 import { vanishesAtPoints } from '../kinds/comparison';
-import { type FormSlip, mapNodes, type ValueSlip } from './slip';
+import { type RatioSlip, type TreeSlip } from './slip';
 import { everywhereAndEach } from './tree-changes';
 
+const id = 'commutator-order';
+const sentence = 'the commutator is taken in the other order';
+
 /** [B, A] was worked out for [A, B]. */
-export const commutatorOrder: FormSlip = {
-  type: 'form',
-  id: 'commutator-order',
-  sentence: 'the commutator is taken in the other order',
+export const commutatorOrder: TreeSlip = {
+  type: 'tree',
+  id,
+  sentence,
   change: (tree) =>
     everywhereAndEach(tree, (node) => {
       if (node.node === 'commutator') return { ...node, left: node.right, right: node.left };
@@ -23,18 +26,18 @@ export const commutatorOrder: FormSlip = {
  * The same where the author wrote the commutator's value: one of two Hermitian operators has no trace and is minus its
  * adjoint, and the other order is its negative.
  */
-export const commutatorOrderOfValue: ValueSlip = {
-  type: 'value',
-  id: 'commutator-order',
-  sentence: commutatorOrder.sentence,
-  change: (value, { context }) => {
-    if (value.kind !== 'operator' && value.kind !== 'pauli') return [];
+export const commutatorOrderOfValue: RatioSlip = {
+  type: 'ratio',
+  id,
+  sentence,
+  factors: (g) => [g.integer(-1)],
+  applies: ({ reference, context }) => {
+    if (reference.kind !== 'operator' && reference.kind !== 'pauli') return false;
     const { g } = context.environment;
-    const conjugate = adjoint(g, value.matrix);
-    const differences = value.matrix.map((node, k) => add(g, node, conjugate[k]!));
-    const isCommutator = [trace(g, value.matrix), ...differences].every(
+    const conjugate = adjoint(g, reference.matrix);
+    const differences = reference.matrix.map((node, k) => add(g, node, conjugate[k]!));
+    return [trace(g, reference.matrix), ...differences].every(
       (node) => node === g.zero || vanishesAtPoints(context, node),
     );
-    return isCommutator ? [mapNodes(value, (node) => negate(g, node))] : [];
   },
 };

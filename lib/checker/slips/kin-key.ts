@@ -6,6 +6,7 @@ import { multiply, negate } from '../algebra/scalars';
 import { type AnswerValue } from '../kinds/answer-value';
 import { nodesOf } from '../kinds/compare';
 import { type Context } from '../kinds/comparison';
+import { looksEqual, valuesOf } from './numeric-match';
 import { mapNodes } from './slip';
 
 type Compare = (reference: AnswerValue, answer: AnswerValue) => boolean;
@@ -122,8 +123,15 @@ function operatorKey(context: Context, reference: AnswerValue, answer: AnswerVal
     'identity',
   );
   if (shifted !== null) return shifted;
+  const seen = valuesOf(point, wanted.slice(1));
+  const typed = valuesOf(point, given.slice(1));
   for (const order of permutations) {
     for (let signs = 0; signs < 8; signs++) {
+      const turned = {
+        re: order.map((k, j) => ((signs >> j) & 1 ? -1 : 1) * seen.re[k]!),
+        im: order.map((k, j) => ((signs >> j) & 1 ? -1 : 1) * seen.im[k]!),
+      };
+      if (!looksEqual('vector', {}, turned, typed)) continue;
       const axes = order.map((k, j) => ((signs >> j) & 1 ? negate(g, wanted[k + 1]!) : wanted[k + 1]!));
       const matrix = fromPauli(g, [wanted[0], axes[0]!, axes[1]!, axes[2]!]);
       if (!compare({ kind: reference.kind, matrix }, answer)) continue;

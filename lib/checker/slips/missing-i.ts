@@ -1,24 +1,26 @@
-import { multiply } from '../algebra/scalars';
-import { type AnswerTree } from '../notation/answer-tree';
-import { type FormSlip, mapNodes, type ValueSlip } from './slip';
+import { type FormSlip, type RatioSlip, type TreeSlip, type Trial } from './slip';
 import { everywhereAndEach, numberNode } from './tree-changes';
 
+const id = 'missing-i';
+const sentence = 'the imaginary unit is left out or put in';
+
 /** The imaginary unit was left out somewhere. */
-export const missingI: FormSlip = {
-  type: 'form',
-  id: 'missing-i',
-  sentence: 'the imaginary unit is left out or put in',
-  change: (tree: AnswerTree) =>
+export const missingI: FormSlip = { type: 'form', id, sentence, change: 'without-i' };
+
+/** The same on the author's tree, where it may stand before an operator that has its own. */
+export const missingIInTree: TreeSlip = {
+  type: 'tree',
+  id,
+  sentence,
+  change: (tree) =>
     everywhereAndEach(tree, (node) => (node.node === 'constant' && node.name === 'i' ? numberNode(1n) : node)),
 };
 
-/** The imaginary unit was put in, or left out in front of everything. */
-export const extraI: ValueSlip = {
-  type: 'value',
-  id: 'missing-i',
-  sentence: missingI.sentence,
-  change: (value, { context }) => {
-    const { g } = context.environment;
-    return [g.i, multiply(g, g.integer(-1), g.i)].map((factor) => mapNodes(value, (node) => multiply(g, factor, node)));
-  },
+/** The imaginary unit was put in, in front of everything, where the reference has none. */
+export const extraI: RatioSlip = {
+  type: 'ratio',
+  id,
+  sentence,
+  factors: (g) => [g.i],
+  applies: ({ referenceTree }: Trial) => missingIInTree.change(referenceTree).length === 0,
 };

@@ -13,7 +13,10 @@ export const roundedDecimal: TestSlip = {
   sentence: 'a rounded decimal stands for an exact value',
   fits: (trial) => {
     const decimals = decimalsOf(trial.answerTree);
-    return decimals.length > 0 && decimals.length <= 4 && shiftsFit(trial, decimals);
+    if (decimals.length === 0 || decimals.length > 4) return false;
+    const wanted = nodesOf(trial.reference);
+    if (shiftsFit(trial, decimals, wanted)) return true;
+    return trial.reference.kind === 'eigenvalues' && shiftsFit(trial, decimals, [...wanted].reverse());
   },
 };
 
@@ -31,9 +34,8 @@ function decimalsOf(tree: AnswerTree): NumberNode[] {
  * Whether moving the decimals by at most half a unit of their last place makes the answer the reference: the small
  * shifts are found by linear least squares at one point and must serve at another.
  */
-function shiftsFit(trial: Trial, decimals: readonly NumberNode[]): boolean {
-  const { context, reference, answer } = trial;
-  const wanted = nodesOf(reference);
+function shiftsFit(trial: Trial, decimals: readonly NumberNode[], wanted: readonly number[]): boolean {
+  const { context, answer } = trial;
   const given = nodesOf(answer);
   if (wanted.length !== given.length) return false;
   const shifted = decimals.map((decimal) => nodesOf(shiftedAnswer(trial, decimal)));

@@ -1,10 +1,9 @@
-import { negate } from '../algebra/scalars';
-import { mapNodes, type ValueSlip } from './slip';
+import { type RatioSlip } from './slip';
 
 /** The overall sign is wrong. */
-export const sign: ValueSlip = {
-  type: 'value',
+export const sign: RatioSlip = {
+  type: 'ratio',
   id: 'sign',
   sentence: 'the overall sign is wrong',
-  change: (value, { context }) => [mapNodes(value, (node) => negate(context.environment.g, node))],
+  factors: (g) => [g.integer(-1)],
 };

@@ -1,8 +1,10 @@
-import { type AnswerValue } from '../kinds/answer-value';
-import { type Context } from '../kinds/comparison';
+import { type Graph, type Node } from '../algebra/graph';
 import { type CheckRequest } from '../contract';
 import { type NumericPoint } from '../equivalence/numeric';
+import { type AnswerValue } from '../kinds/answer-value';
+import { type Context } from '../kinds/comparison';
 import { type AnswerTree } from '../notation/answer-tree';
+import { type FormChange } from './form-change';
 
 /** What a slip is tried on. */
 export interface Trial {
@@ -12,43 +14,55 @@ export interface Trial {
   readonly reference: AnswerValue;
   readonly answerTree: AnswerTree;
   readonly answer: AnswerValue;
-  /** Whether a changed reference agrees with the answer, under the options of the check. */
+  /** Whether a changed reference agrees with the answer, exactly and under the options of the check. */
   readonly compare: (reference: AnswerValue, answer: AnswerValue) => boolean;
-  /** The point at which reference and answer differ. */
-  readonly point: NumericPoint | undefined;
+  /** The point at which reference and answer are seen to differ; the changes are tried here before they are proved. */
+  readonly point: NumericPoint;
 }
 
-/** A slip whose mistake is a change of the value. */
-export interface ValueSlip {
-  readonly type: 'value';
+interface Named {
   readonly id: string;
   /** What happened, to stand after “differs from the reference:”. */
   readonly sentence: string;
+}
+
+/** The answer is a constant times the reference. */
+export interface RatioSlip extends Named {
+  readonly type: 'ratio';
+  readonly factors: (g: Graph, hbar: Node) => readonly Node[];
+  /** Whether the slip makes sense for this reference; always where absent. */
+  readonly applies?: (trial: Trial) => boolean;
+}
+
+/** Another change of the value. */
+export interface ValueSlip extends Named {
+  readonly type: 'value';
   /** The changed references, most likely first; none where the slip does not fit the kind. */
   readonly change: (value: AnswerValue, trial: Trial) => readonly AnswerValue[];
 }
 
-/** A slip whose mistake is a change of the form: tried on the author's tree and on the normal form's. */
-export interface FormSlip {
+/** A change of the form: made on the author's form and on the normal form, everywhere or at one place. */
+export interface FormSlip extends Named {
   readonly type: 'form';
-  readonly id: string;
-  readonly sentence: string;
-  /** The changed trees, most likely first. */
+  readonly change: FormChange;
+}
+
+/** A change of the form that needs the author's own tree, in which operators and functions are still to be seen. */
+export interface TreeSlip extends Named {
+  readonly type: 'tree';
   readonly change: (tree: AnswerTree) => readonly AnswerTree[];
 }
 
 /** A slip that is recognised by looking at the answer itself. */
-export interface TestSlip {
+export interface TestSlip extends Named {
   readonly type: 'test';
-  readonly id: string;
-  readonly sentence: string;
   readonly fits: (trial: Trial) => boolean;
 }
 
-export type Slip = ValueSlip | FormSlip | TestSlip;
+export type Slip = RatioSlip | ValueSlip | FormSlip | TreeSlip | TestSlip;
 
 /** A value with every scalar node changed alike; of eigenpairs, the values only. */
-export function mapNodes(value: AnswerValue, change: (node: number) => number): AnswerValue {
+export function mapNodes(value: AnswerValue, change: (node: Node) => Node): AnswerValue {
   switch (value.kind) {
     case 'scalar':
       return { ...value, node: change(value.node) };
@@ -69,4 +83,16 @@ export function mapNodes(value: AnswerValue, change: (node: number) => number): 
         pairs: value.pairs.map((pair) => ({ value: change(pair.value), state: pair.state })),
       };
   }
+}
+
+/** The same, with the components of states changed too. */
+export function mapAllNodes(value: AnswerValue, change: (node: Node) => Node): AnswerValue {
+  if (value.kind !== 'eigenpairs') return mapNodes(value, change);
+  return {
+    kind: 'eigenpairs',
+    pairs: value.pairs.map((pair) => ({
+      value: change(pair.value),
+      state: [change(pair.state[0]), change(pair.state[1])],
+    })),
+  };
 }

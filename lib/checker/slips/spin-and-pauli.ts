@@ -1,9 +1,9 @@
-import { type FormSlip } from './slip';
+import { type TreeSlip } from './slip';
 import { everywhereAndEach } from './tree-changes';
 
 /** σ stands where S should. */
-export const pauliForSpin: FormSlip = {
-  type: 'form',
+export const pauliForSpin: TreeSlip = {
+  type: 'tree',
   id: 'pauli-for-spin',
   sentence: 'a Pauli matrix stands where a spin operator should',
   change: (tree) =>
@@ -13,8 +13,8 @@ export const pauliForSpin: FormSlip = {
 };
 
 /** S stands where σ should. */
-export const spinForPauli: FormSlip = {
-  type: 'form',
+export const spinForPauli: TreeSlip = {
+  type: 'tree',
   id: 'spin-for-pauli',
   sentence: 'a spin operator stands where a Pauli matrix should',
   change: (tree) =>

@@ -1,0 +1,78 @@
+import { type CheckOptions } from '../contract';
+import { type AnswerValue } from '../kinds/answer-value';
+
+/** Complex values of some elements, in two arrays. */
+export interface Values {
+  readonly re: readonly number[];
+  readonly im: readonly number[];
+}
+
+const CLOSE = 1e-9;
+
+/** Values of nodes from arrays by node. */
+export function valuesOf(
+  at: { readonly re: Float64Array; readonly im: Float64Array },
+  nodes: readonly number[],
+): Values {
+  return { re: nodes.map((node) => at.re[node]!), im: nodes.map((node) => at.im[node]!) };
+}
+
+/**
+ * Whether two sets of values look equal under a kind's rule, at one point and in doubles. A filter only: true is to be
+ * proved, and where the rule is involved (eigenpairs) nothing is filtered out.
+ */
+export function looksEqual(kind: AnswerValue['kind'], options: CheckOptions, x: Values, y: Values): boolean {
+  if (kind === 'eigenpairs' || options.tolerance) return true;
+  const n = x.re.length;
+  if (n !== y.re.length) return false;
+  if (kind === 'eigenvalues') {
+    return (near(x, 0, y, 0) && near(x, 1, y, 1)) || (near(x, 0, y, 1) && near(x, 1, y, 0));
+  }
+  const ray = options.upToPhase || (options.upToScale && kind === 'state');
+  if (ray && kind !== 'scalar' && kind !== 'vector') return sameRay(x, y, !options.upToScale || kind !== 'state');
+  const scale = largest(x) + largest(y);
+  for (let k = 0; k < n; k++) {
+    if (Math.abs(x.re[k]! - y.re[k]!) + Math.abs(x.im[k]! - y.im[k]!) > CLOSE * scale) return false;
+  }
+  return true;
+}
+
+/** Ratio y/x at the largest element of x. */
+export function ratioOf(x: Values, y: Values): { readonly re: number; readonly im: number } | null {
+  let pivot = 0;
+  for (let k = 1; k < x.re.length; k++) if (size(x, k) > size(x, pivot)) pivot = k;
+  const square = size(x, pivot) ** 2;
+  if (!(square > 0) || x.re.length !== y.re.length) return null;
+  return {
+    re: (y.re[pivot]! * x.re[pivot]! + y.im[pivot]! * x.im[pivot]!) / square,
+    im: (y.im[pivot]! * x.re[pivot]! - y.re[pivot]! * x.im[pivot]!) / square,
+  };
+}
+
+/** f·x for one complex factor. */
+export function scaledBy(x: Values, f: { readonly re: number; readonly im: number }): Values {
+  return {
+    re: x.re.map((re, k) => re * f.re - x.im[k]! * f.im),
+    im: x.re.map((re, k) => re * f.im + x.im[k]! * f.re),
+  };
+}
+
+const size = (x: Values, k: number): number => Math.hypot(x.re[k]!, x.im[k]!);
+
+function largest(x: Values): number {
+  let most = 0;
+  for (let k = 0; k < x.re.length; k++) most = Math.max(most, Math.abs(x.re[k]!) + Math.abs(x.im[k]!));
+  return most;
+}
+
+function near(x: Values, j: number, y: Values, k: number): boolean {
+  const distance = Math.abs(x.re[j]! - y.re[k]!) + Math.abs(x.im[j]! - y.im[k]!);
+  return distance <= CLOSE * (largest(x) + largest(y));
+}
+
+function sameRay(x: Values, y: Values, sameNorm: boolean): boolean {
+  const ratio = ratioOf(x, y);
+  if (!ratio) return false;
+  if (sameNorm && Math.abs(Math.hypot(ratio.re, ratio.im) - 1) > CLOSE) return false;
+  return looksEqual('vector', {}, scaledBy(x, ratio), y);
+}
