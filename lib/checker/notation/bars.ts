@@ -1,6 +1,7 @@
 /** Pairing of the bars that are no part of a ket or bra. */
 import { type Diagnostic } from '../diagnostics';
 import { maximumDepth } from './limits';
+import { isSign } from './parse-sign';
 import { endsOperand, nesting, startsOperand } from './starts';
 import { type Token, type TokenKind } from './token';
 
@@ -66,17 +67,14 @@ function pair(tokens: readonly Token[], bars: readonly number[]): Diagnostic | n
   const ways = new Uint8Array((count + 1) * width);
   ways[count * width] = 1;
   ways[count * width + 1] = 1;
+  const sides = bars.map((index) => sidesOf(tokens, index));
   for (let bar = count - 1; bar >= 0; bar -= 1) {
+    const { opens, closes, afterBar } = sides[bar] ?? noSides;
     for (let depth = 0; depth <= deepest; depth += 1) {
-      for (let opened = 0; opened <= 1; opened += 1) {
-        const open = mayOpen(tokens, bars, bar, depth, deepest)
-          ? (ways[(bar + 1) * width + (depth + 1) * 2 + 1] ?? 0)
-          : 0;
-        const close = mayClose(tokens, bars, bar, depth, opened === 1)
-          ? (ways[(bar + 1) * width + (depth - 1) * 2] ?? 0)
-          : 0;
-        ways[bar * width + depth * 2 + opened] = Math.min(2, open + close);
-      }
+      const open = opens && depth < deepest ? (ways[(bar + 1) * width + (depth + 1) * 2 + 1] ?? 0) : 0;
+      const close = depth > 0 ? (ways[(bar + 1) * width + (depth - 1) * 2] ?? 0) : 0;
+      ways[bar * width + depth * 2] = Math.min(2, open + (closes || afterBar ? close : 0));
+      ways[bar * width + depth * 2 + 1] = Math.min(2, open + (closes ? close : 0));
     }
   }
   if (ways[0] === 0) return unpaired(tokens, bars);
@@ -87,46 +85,29 @@ function pair(tokens: readonly Token[], bars: readonly number[]): Diagnostic | n
   let depth = 0;
   for (let bar = 0; bar < count; bar += 1) {
     const token = tokens[bars[bar] ?? 0];
-    const open = mayOpen(tokens, bars, bar, depth, deepest) && (ways[(bar + 1) * width + (depth + 1) * 2 + 1] ?? 0) > 0;
+    const opens = sides[bar]?.opens === true && depth < deepest;
+    const open = opens && (ways[(bar + 1) * width + (depth + 1) * 2 + 1] ?? 0) > 0;
     if (token) token.kind = open ? 'bar-open' : 'bar-close';
     depth += open ? 1 : -1;
   }
   return null;
 }
 
-function mayOpen(
-  tokens: readonly Token[],
-  bars: readonly number[],
-  bar: number,
-  depth: number,
-  deepest: number,
-): boolean {
-  if (depth >= deepest) return false;
-  const next = tokens[(bars[bar] ?? 0) + 1];
-  if (next === undefined) return false;
-  return (
-    next.kind === 'bar' ||
-    startsOperand(next) ||
-    next.kind === '+' ||
-    next.kind === '-' ||
-    next.kind === '±' ||
-    next.kind === '∓'
-  );
+/** What a bar may do: open before an operand, close after one, or close after a bar that closes. */
+interface Sides {
+  readonly opens: boolean;
+  readonly closes: boolean;
+  readonly afterBar: boolean;
 }
 
-function mayClose(
-  tokens: readonly Token[],
-  bars: readonly number[],
-  bar: number,
-  depth: number,
-  opened: boolean,
-): boolean {
-  if (depth === 0) return false;
-  const index = bars[bar] ?? 0;
+const noSides: Sides = { opens: false, closes: false, afterBar: false };
+
+function sidesOf(tokens: readonly Token[], index: number): Sides {
+  const next = tokens[index + 1];
   const before = tokens[index - 1];
-  if (before?.kind === 'bar') return !opened;
-  if (before?.kind === '*' && tokens[index - 2]?.kind === '^') return true;
-  return endsOperand(before);
+  const opens = next !== undefined && (next.kind === 'bar' || startsOperand(next) || isSign(next));
+  const starred = before?.kind === '*' && tokens[index - 2]?.kind === '^';
+  return { opens, closes: starred || endsOperand(before), afterBar: before?.kind === 'bar' };
 }
 
 function unpaired(tokens: readonly Token[], bars: readonly number[]): Diagnostic {

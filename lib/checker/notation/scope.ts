@@ -30,6 +30,8 @@ export interface Scope {
   readonly joined: readonly Spelling[];
   /** Declared names as given, for hints. */
   readonly names: readonly string[];
+  /** Letters of the longest declared index as spelled, at least 1. */
+  readonly longestIndex: number;
   readonly allowReferenceFunctions: boolean;
   readonly declaresE: boolean;
   readonly declaresCapitalE: boolean;
@@ -101,6 +103,7 @@ export function buildScope(names: readonly string[], allowReferenceFunctions: bo
   const suffixed: Spelling[] = [];
   const joined: Spelling[] = [];
   let sound = true;
+  let longestIndex = 1;
   for (const name of names) {
     const parts = nameParts(name);
     sound &&= parts !== null && !isReserved(parts);
@@ -114,6 +117,7 @@ export function buildScope(names: readonly string[], allowReferenceFunctions: bo
         plain.set(text, meaning);
       } else {
         suffixed.push(spelling);
+        longestIndex = Math.max(longestIndex, index.length, greekNames.get(index)?.length ?? 0);
         if (primes === 0 && letterAt(index, 0) !== '') {
           for (const letters of spellings(index)) joined.push({ text: text + letters, index: '', primes: 0, meaning });
         }
@@ -126,6 +130,7 @@ export function buildScope(names: readonly string[], allowReferenceFunctions: bo
     suffixed,
     joined,
     names,
+    longestIndex,
     allowReferenceFunctions,
     declaresE: plain.has('e'),
     declaresCapitalE: plain.has('E'),

@@ -38,7 +38,7 @@ export function letterAt(source: string, position: number): string {
   if (code < 0xb5) return '';
   if (code === 0xd835) {
     const plain = source.slice(position, position + 2).normalize('NFKC');
-    return plain.length === 1 && letterAt(plain, 0) !== '' ? letterAt(plain, 0) : '';
+    return plain.length === 1 && plain.charCodeAt(0) !== code ? letterAt(plain, 0) : '';
   }
   const character = source.charAt(position);
   const variant = letterVariants.get(character);
@@ -139,7 +139,11 @@ export function closingAngle(source: string, from: number): number {
 
 /** The position after a bar that follows, or −1. */
 export function followingBar(source: string, from: number): number {
-  const position = skipBlank(source, from);
+  return barAt(source, skipBlank(source, from));
+}
+
+/** The position after the bar at this position, or −1. */
+export function barAt(source: string, position: number): number {
   if (position >= source.length) return -1;
   if ('|∣ǀ'.includes(source.charAt(position))) return position + 1;
   if (source.charCodeAt(position) !== 92) return -1;

@@ -1,7 +1,7 @@
 /** LaTeX commands to tokens. */
 import { commandTokens, faceCommands, greekByName, identityFaces, letterCommands } from './characters';
 import { scanEnvironment, scanIdentity, scanStates } from './scan';
-import { commandAt, followingBar, isDecoration, skipBlank } from './source';
+import { barAt, commandAt, isDecoration, skipBlank } from './source';
 import { type TokenKind } from './token';
 import { type TokenWriter } from './token-writer';
 import { readAngle, readBar } from './tokenise-state';
@@ -64,11 +64,12 @@ function readDecoration(writer: TokenWriter, name: string, length: number): void
   writer.position += length;
   writer.spaced = true;
   if (name !== 'left' && name !== 'right') return;
-  const next = skipBlank(writer.source, writer.position);
-  if (writer.source.charAt(next) === '.' && next === writer.position) writer.position += 1;
-  const barEnd = followingBar(writer.source, writer.position);
+  // Only spaces are passed here: looking past further commands would take time quadratic in a row of them.
+  while (writer.source.charCodeAt(writer.position) === 32) writer.position += 1;
+  const next = writer.position;
+  if (writer.source.charCodeAt(next) === 46) writer.position += 1;
+  const barEnd = barAt(writer.source, next);
   if (barEnd < 0) return;
-  writer.position = next;
   readBar(writer, barEnd - next, name === 'left', name === 'right');
 }
 

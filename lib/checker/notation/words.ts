@@ -5,9 +5,6 @@ import { noSuffix, splitRun, type Split, type Suffix } from './split';
 import { makeToken, type Token } from './token';
 import { builtInWords, referenceMeaning, type Meaning } from './vocabulary';
 
-/** Longest index that is looked for in an unbraced run of letters. */
-const longestIndex = 16;
-
 export interface Words {
   readonly tokens: Token[];
   /** Whether a run had another complete split with a different meaning. */
@@ -138,7 +135,7 @@ class Resolver {
 
   private unbracedLetters(token: Token, after: Token): void {
     const letters = after.text;
-    for (let length = Math.min(letters.length, longestIndex); length >= 1; length -= 1) {
+    for (let length = Math.min(letters.length, this.scope.longestIndex); length >= 1; length -= 1) {
       const index = greekLetter(letters.slice(0, length));
       const whole = length === letters.length;
       const primes = whole ? this.primes(this.at + 3) : { count: 0, next: this.at + 3 };
