@@ -6,14 +6,14 @@ import { type StudentPart } from '@/lib/presenters/student-set';
 interface PartMarginProps {
   readonly part: StudentPart;
   readonly zone: string;
-  /** Said in place of "not submitted" for a part without a submitted answer. */
-  readonly nothing?: string;
+  /** Nothing can be submitted any more: what is to be done, and attempts, are not told. */
+  readonly isClosed?: boolean;
   /** Buttons and what became of pressing them. */
   readonly children?: ReactNode;
 }
 
 /** The margin of a part: its marks, what was submitted and when, the attempts, and never a word on correctness but by policy. */
-export function PartMargin({ part, zone, nothing = 'not submitted', children }: PartMarginProps) {
+export function PartMargin({ part, zone, isClosed = false, children }: PartMarginProps) {
   const { handedIn, attemptsAllowed, attemptsLeft } = part;
   const used = attemptsAllowed - attemptsLeft;
   return (
@@ -30,14 +30,16 @@ export function PartMargin({ part, zone, nothing = 'not submitted', children }: 
               receipt <span className="font-mono text-note">{handedIn.receipt}</span>
             </p>
           </>
-        ) : (
-          <p>{nothing}</p>
+        ) : isClosed ? null : (
+          <p>not submitted</p>
         )}
         {handedIn && !handedIn.readable ? <p>a person will read it; it cost no attempt</p> : null}
-        <p>
-          attempt {used} of {attemptsAllowed}
-          {attemptsLeft === 0 ? ', none left' : null}
-        </p>
+        {isClosed ? null : (
+          <p>
+            attempt {used} of {attemptsAllowed}
+            {attemptsLeft === 0 ? ', none left' : null}
+          </p>
+        )}
       </div>
       {handedIn?.verdict ? <Told verdict={handedIn.verdict} /> : null}
       {children ? <div className="mt-2.5 grid justify-items-start gap-2.5">{children}</div> : null}

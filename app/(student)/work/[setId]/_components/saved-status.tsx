@@ -28,7 +28,7 @@ export function SavedStatus() {
         </span>
       )}
       <span role="status" className="sr-only">
-        {isTrouble ? `What you type is ${words[worst]}.` : ''}
+        {isTrouble ? `Saving: ${words[worst]}.` : ''}
       </span>
     </>
   );

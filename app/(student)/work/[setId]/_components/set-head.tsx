@@ -27,10 +27,10 @@ export function SetHead({ actor, set, saved }: { actor: PersonActor; set: Studen
 function ClosingTime({ set }: { set: StudentSet }) {
   if (set.isReleased) return 'released';
   if (set.closesAt === null) return set.takesAnswers ? 'open' : 'closed';
+  const verb = set.isExtended ? 'extended to' : 'closes';
   return (
     <>
-      {set.takesAnswers ? 'closes' : 'closed'} <TimeStamp at={set.closesAt} zone={set.course.timeZone} />
-      {set.isExtended ? ' (extended for you)' : null}
+      {set.takesAnswers ? verb : 'closed'} <TimeStamp at={set.closesAt} zone={set.course.timeZone} />
     </>
   );
 }

@@ -9,18 +9,18 @@ interface ShownPartProps {
   readonly place: number;
   readonly part: StudentPart;
   readonly zone: string;
-  /** Why nothing can be typed here, where that needs saying. */
-  readonly why?: string;
+  /** The whole set takes no more answers; otherwise only this part's attempts are used up. */
+  readonly isClosed?: boolean;
 }
 
 /** A part that takes no more answers: one's own answer, and what was typed and never submitted. */
-export function ShownPart({ place, part, zone, why }: ShownPartProps) {
+export function ShownPart({ place, part, zone, isClosed = false }: ShownPartProps) {
   return (
     <PartRow
       letter={part.key}
       label={`Question ${place}, part ${part.key}`}
       prompt={<Markdown source={part.prompt} inline />}
-      margin={<PartMargin part={part} zone={zone} nothing="nothing was submitted" />}
+      margin={<PartMargin part={part} zone={zone} isClosed={isClosed} />}
     >
       {part.handedIn ? (
         <SubmittedAnswer text={part.handedIn.text} reading={part.reading} />
@@ -32,7 +32,6 @@ export function ShownPart({ place, part, zone, why }: ShownPartProps) {
           Typed and never submitted: <code className="break-words whitespace-pre-wrap text-ink">{part.unsent}</code>
         </p>
       ) : null}
-      {why ? <p className="mt-2 text-small text-grey">{why}</p> : null}
     </PartRow>
   );
 }
