@@ -177,7 +177,7 @@ function serverSettings(place, port) {
  * Ends a server of this cluster that a killed start left behind, and clears the pid file of one that is gone. A pid in
  * that file may since belong to another program, which is left alone.
  */
-async function endLeftoverServer(place) {
+export async function endLeftoverServer(place) {
   const lines = readPidFile(place.home);
   if (lines === null) return;
   const file = path.join(place.home, 'data', 'postmaster.pid');

@@ -1,9 +1,11 @@
+import { createHash } from 'node:crypto';
 import { spawnSync } from 'node:child_process';
+import { existsSync, readFileSync } from 'node:fs';
 import path from 'node:path';
 import { clusterHome, clusterVersion, databaseUser } from './cluster-folder.mjs';
-import { ensureCluster, startCluster } from './cluster.mjs';
+import { endLeftoverServer, ensureCluster, startCluster } from './cluster.mjs';
 import { Failure, lastWords } from './failure.mjs';
-import { readJson, writeJson } from './files.mjs';
+import { readJson, writeJson, writeWhole } from './files.mjs';
 import { inState, projectRoot, stateFolder } from './folders.mjs';
 import { ensurePostgresPrograms } from './postgres-programs.mjs';
 import { secrets } from './secrets.mjs';
@@ -35,7 +37,7 @@ export async function openOwnDatabase(say) {
   };
   const isNew = clusterVersion(home) === null;
   await ensureCluster(place);
-  if (keys.isNew && !isNew) resetSuperuserPassword(place);
+  await ensurePassword(place, isNew);
 
   const ports = inState('ports.json');
   const server = await startCluster(place, readJson(ports)?.database ?? 0);
@@ -101,25 +103,34 @@ export async function withClient(url, use) {
 }
 
 /**
- * Where .halfmark was lost but the cluster (outside of it) was not: sets a new password, in the mode in which the
- * server takes statements from its owner alone and listens to nobody.
+ * A note beside the cluster tells which password it has (by its hash). Where that is not ours, as when .halfmark was
+ * lost but the cluster outside of it was not, ours is set, in the mode in which the server takes statements from its
+ * owner alone and listens to nobody.
  */
-function resetSuperuserPassword({ home, programs, user, password }) {
-  const { status, stdout, stderr } = spawnSync(
-    path.join(programs, 'postgres'),
-    ['--single', '-D', path.join(home, 'data'), 'postgres'],
-    {
-      ...user,
-      cwd: home,
-      input: `alter role postgres password '${password}'\n`,
-      encoding: 'utf8',
-      env: { PATH: process.env.PATH, LC_ALL: 'C.UTF-8' },
-    },
-  );
-  if (status !== 0 || /ERROR|FATAL/.test(`${stdout}${stderr}`)) {
-    throw new Failure(
-      `The database in ${home} belongs to an earlier .halfmark, and its password could not be set anew: ${lastWords(stderr)}`,
-      'Put .halfmark back, or move that folder aside to begin anew.',
+async function ensurePassword(place, isNew) {
+  const { home, programs, user, password } = place;
+  const note = path.join(home, 'password-hash');
+  const hash = createHash('sha256').update(password).digest('hex');
+  if (existsSync(note) && readFileSync(note, 'utf8') === hash) return;
+  if (!isNew) {
+    await endLeftoverServer(place);
+    const { status, stdout, stderr } = spawnSync(
+      path.join(programs, 'postgres'),
+      ['--single', '-D', path.join(home, 'data'), 'postgres'],
+      {
+        ...user,
+        cwd: home,
+        input: `alter role postgres password '${password}'\n`,
+        encoding: 'utf8',
+        env: { PATH: process.env.PATH, LC_ALL: 'C.UTF-8' },
+      },
     );
+    if (status !== 0 || /ERROR|FATAL/.test(`${stdout}${stderr}`)) {
+      throw new Failure(
+        `The database in ${home} belongs to an earlier .halfmark, and its password could not be set anew: ${lastWords(stderr)}`,
+        'Put .halfmark back, or move that folder aside to begin anew.',
+      );
+    }
   }
+  writeWhole(note, hash);
 }

@@ -6,7 +6,7 @@ import { inState } from './folders.mjs';
 /**
  * The secrets of this clone, made at the first start and kept in a file that only its owner may read.
  *
- * @returns {{ superuserPassword: string, databasePassword: string, sessionSecret: string, isNew: boolean }}
+ * @returns {{ superuserPassword: string, databasePassword: string, sessionSecret: string }}
  */
 export function secrets() {
   const file = inState('secrets.json');
@@ -18,7 +18,7 @@ export function secrets() {
   };
   if (kept === null || Object.keys(all).some((name) => kept[name] !== all[name])) writeJson(file, all);
   else chmodSync(file, 0o600);
-  return { ...all, isNew: kept === null };
+  return all;
 }
 
 /** 256 random bits in letters, digits, - and _, which need no quoting in an address. */
