@@ -3,7 +3,7 @@ import { type Expression } from '../notation/tree';
 import { type Environment, flagsOfDomain } from './environment';
 import { Flag, type Graph, type Node, Op } from './graph';
 import { fromPolynomial, normalForm } from './normal-form';
-import { addTerm, monomialKey, type Polynomial } from './polynomial';
+import { addTerm, emptyPolynomial, monomialKey, type Polynomial } from './polynomial';
 import { squareRoot } from './roots';
 import { add, divide, multiply, negate, power, scale, subtract } from './scalars';
 import { rational } from './rational';
@@ -93,7 +93,7 @@ function solve(environment: Environment, difference: Node): boolean {
 
 /** Coefficients of 1, s, s² in a form; null where s occurs otherwise. */
 function coefficients(g: Graph, form: Polynomial, s: Node): [Polynomial, Polynomial, Polynomial] | null {
-  const parts: [Polynomial, Polynomial, Polynomial] = [new Map(), new Map(), new Map()];
+  const parts: [Polynomial, Polynomial, Polynomial] = [emptyPolynomial(), emptyPolynomial(), emptyPolynomial()];
   for (const { coefficient, monomial } of form.values()) {
     let degree = 0;
     for (const { atom, exponent } of monomial) {

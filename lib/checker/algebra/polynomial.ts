@@ -49,11 +49,15 @@ export function monomialKey(m: Monomial): string {
 }
 
 export function constant(c: Rational): Polynomial {
-  return isZero(c) ? new Map() : new Map([['', { coefficient: c, monomial: [] }]]);
+  return fromMonomial(c, []);
 }
 
+export const emptyPolynomial = (): Polynomial => new Map<string, Term>();
+
 export function fromMonomial(coefficient: Rational, monomial: Monomial): Polynomial {
-  return isZero(coefficient) ? new Map() : new Map([[monomialKey(monomial), { coefficient, monomial }]]);
+  const polynomial = emptyPolynomial();
+  if (!isZero(coefficient)) polynomial.set(monomialKey(monomial), { coefficient, monomial });
+  return polynomial;
 }
 
 export const fromAtom = (atom: Node, exponent: Rational = ONE): Polynomial => fromMonomial(ONE, [{ atom, exponent }]);

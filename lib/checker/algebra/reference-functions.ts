@@ -129,64 +129,64 @@ const operatorOf =
     operatorValue(f(c, ...values));
 
 const table: Record<ReferenceName, ReferenceFunction> = {
-  commutator: operatorOf(({ g }, a, b) => operators.commutator(g, asOperator(g, a!), asOperator(g, b!))),
-  anticommutator: operatorOf(({ g }, a, b) => operators.anticommutator(g, asOperator(g, a!), asOperator(g, b!))),
+  commutator: operatorOf(({ g }, a, b) => operators.commutator(g, asOperator(g, a), asOperator(g, b))),
+  anticommutator: operatorOf(({ g }, a, b) => operators.anticommutator(g, asOperator(g, a), asOperator(g, b))),
   /** a0 ± √(a·a) for a0·1 + a·σ. */
   eigenvalues: ({ g }, a) => {
-    const { centre, splitting } = operators.centreAndSplitting(g, asOperator(g, a!));
+    const { centre, splitting } = operators.centreAndSplitting(g, asOperator(g, a));
     return listValue([add(g, centre, splitting), subtract(g, centre, splitting)]);
   },
-  eigenpairs: (c, a) => ({ type: 'pairs', pairs: eigenpairs(c, asOperator(c.g, a!)) }),
-  trace: scalarOf(({ g }, a) => operators.trace(g, asOperator(g, a!))),
-  determinant: scalarOf(({ g }, a) => operators.determinant(g, asOperator(g, a!))),
+  eigenpairs: (c, a) => ({ type: 'pairs', pairs: eigenpairs(c, asOperator(c.g, a)) }),
+  trace: scalarOf(({ g }, a) => operators.trace(g, asOperator(g, a))),
+  determinant: scalarOf(({ g }, a) => operators.determinant(g, asOperator(g, a))),
   adjoint: ({ g }, a) => {
-    if (a!.type === 'ket' || a!.type === 'bra') {
-      const components = operators.conjugateComponents(g, a!.components);
-      return { type: a!.type === 'ket' ? 'bra' : 'ket', components };
+    if (a.type === 'ket' || a.type === 'bra') {
+      const components = operators.conjugateComponents(g, a.components);
+      return { type: a.type === 'ket' ? 'bra' : 'ket', components };
     }
-    return a!.type === 'scalar'
-      ? scalarValue(conjugate(g, a!.node))
-      : operatorValue(operators.adjoint(g, asOperator(g, a!)));
+    return a.type === 'scalar'
+      ? scalarValue(conjugate(g, a.node))
+      : operatorValue(operators.adjoint(g, asOperator(g, a)));
   },
   /** a0 = ½Tr A, a_k = ½Tr σ_k A (Pauli 1927). */
-  pauli: ({ g }, a) => listValue(operators.pauliCoefficients(g, asOperator(g, a!))),
-  expectation: scalarOf((c, a, state) => expectation(c, asOperator(c.g, a!), state!)),
-  variance: scalarOf((c, a, state) => variance(c, asOperator(c.g, a!), state!)),
+  pauli: ({ g }, a) => listValue(operators.pauliCoefficients(g, asOperator(g, a))),
+  expectation: scalarOf((c, a, state) => expectation(c, asOperator(c.g, a), state)),
+  variance: scalarOf((c, a, state) => variance(c, asOperator(c.g, a), state)),
   /** √(variance). */
-  uncertainty: scalarOf((c, a, state) => squareRoot(c.g, variance(c, asOperator(c.g, a!), state!))),
+  uncertainty: scalarOf((c, a, state) => squareRoot(c.g, variance(c, asOperator(c.g, a), state))),
   /** |⟨φ|ψ⟩|² of normalised states, or ⟨φ|ρ|φ⟩ (Born 1926). */
   probability: scalarOf((c, phi, state) => {
     const { g } = c;
-    const x = asKet(phi!);
+    const x = asKet(phi);
     requireUnit(c, operators.normSquared(g, x), 'the state is not normalised');
-    if (state!.type !== 'ket') return expectation(c, densityOf(c, state!), phi!);
-    requireUnit(c, operators.normSquared(g, state!.components), 'the state is not normalised');
-    return absoluteSquare(g, operators.contract(g, operators.conjugateComponents(g, x), state!.components));
+    if (state.type !== 'ket') return expectation(c, densityOf(c, state), phi);
+    requireUnit(c, operators.normSquared(g, state.components), 'the state is not normalised');
+    return absoluteSquare(g, operators.contract(g, operators.conjugateComponents(g, x), state.components));
   }),
   /** |ψ⟩⟨ψ|/⟨ψ|ψ⟩. */
   projector: operatorOf(({ g }, psi) => {
-    const v = asKet(psi!);
+    const v = asKet(psi);
     const norm = operators.normSquared(g, v);
     return operators.scaleOperator(g, power(g, norm, -1), operators.outer(g, v, operators.conjugateComponents(g, v)));
   }),
-  density: operatorOf((c, psi) => densityOf(c, psi!)),
-  bloch: (c, state) => listValue(bloch(c, densityOf(c, state!))),
+  density: operatorOf((c, psi) => densityOf(c, psi)),
+  bloch: (c, state) => listValue(bloch(c, densityOf(c, state))),
   /** Tr ρ². */
   purity: scalarOf((c, rho) => {
-    const matrix = densityOf(c, rho!);
+    const matrix = densityOf(c, rho);
     return operators.trace(c.g, operators.multiplyOperators(c.g, matrix, matrix));
   }),
-  entropy: scalarOf((c, rho) => entropy(c, densityOf(c, rho!))),
+  entropy: scalarOf((c, rho) => entropy(c, densityOf(c, rho))),
   /** (cos θ/2, e^{iφ} sin θ/2) (Sakurai & Napolitano §3.2). */
   spinor: ({ g }, theta, phi) => {
-    const halfAngle = scale(g, HALF, asScalar(theta!));
-    const phase = exp(g, multiply(g, g.i, asScalar(phi!)));
+    const halfAngle = scale(g, HALF, asScalar(theta));
+    const phase = exp(g, multiply(g, g.i, asScalar(phi)));
     return ketValue([cos(g, halfAngle), multiply(g, phase, sin(g, halfAngle))]);
   },
   /** e^{−iθ n·σ/2} for a unit vector n (active rotation; Sakurai & Napolitano §3.2). */
   rotation: operatorOf((c, n, theta) => {
     const { g } = c;
-    const axis = asList(n!);
+    const axis = asList(n);
     requireUnit(
       c,
       sum(
@@ -195,35 +195,35 @@ const table: Record<ReferenceName, ReferenceFunction> = {
       ),
       'the axis of rotation is not a unit vector',
     );
-    const factor = scale(g, rational(-1, 2), multiply(g, g.i, asScalar(theta!)));
+    const factor = scale(g, rational(-1, 2), multiply(g, g.i, asScalar(theta)));
     return operators.exponentialOfOperator(g, operators.scaleOperator(g, factor, dotSigma(g, axis)));
   }),
-  propagator: operatorOf((c, h, t) => propagator(c, asOperator(c.g, h!), asScalar(t!))),
+  propagator: operatorOf((c, h, t) => propagator(c, asOperator(c.g, h), asScalar(t))),
   /** e^{−iHt/ħ}ψ. */
   evolve: (c, h, t, psi) =>
-    ketValue(operators.applyToKet(c.g, propagator(c, asOperator(c.g, h!), asScalar(t!)), asKet(psi!))),
+    ketValue(operators.applyToKet(c.g, propagator(c, asOperator(c.g, h), asScalar(t)), asKet(psi))),
   /** U†AU with U = e^{−iHt/ħ} (Sakurai & Napolitano §2.2). */
   heisenberg: operatorOf((c, a, h, t) => {
-    const u = propagator(c, asOperator(c.g, h!), asScalar(t!));
-    const right = operators.multiplyOperators(c.g, asOperator(c.g, a!), u);
+    const u = propagator(c, asOperator(c.g, h), asScalar(t));
+    const right = operators.multiplyOperators(c.g, asOperator(c.g, a), u);
     return operators.multiplyOperators(c.g, operators.adjoint(c.g, u), right);
   }),
   /** H = −γ B·S = −(γħ/2) B·σ (Larmor 1897; Sakurai & Napolitano §2.1). */
   larmor: operatorOf(({ g, hbar }, gamma, field) => {
-    const factor = scale(g, rational(-1, 2), multiply(g, asScalar(gamma!), hbar));
-    return operators.scaleOperator(g, factor, dotSigma(g, asList(field!)));
+    const factor = scale(g, rational(-1, 2), multiply(g, asScalar(gamma), hbar));
+    return operators.scaleOperator(g, factor, dotSigma(g, asList(field)));
   }),
   /** (ω1²/Ω²) sin²(Ωt/2), Ω² = ω1² + Δ² (Rabi 1937). */
   rabi: scalarOf(({ g }, omega1, delta, t) => {
-    const drive = power(g, asScalar(omega1!), 2);
-    const square = add(g, drive, power(g, asScalar(delta!), 2));
-    const phase = scale(g, HALF, multiply(g, squareRoot(g, square), asScalar(t!)));
+    const drive = power(g, asScalar(omega1), 2);
+    const square = add(g, drive, power(g, asScalar(delta), 2));
+    const phase = scale(g, HALF, multiply(g, squareRoot(g, square), asScalar(t)));
     return multiply(g, divide(g, drive, square), power(g, sin(g, phase), 2));
   }),
   /** e^{−H/k_BT}/Tr e^{−H/k_BT} (Gibbs 1902). */
   thermal: operatorOf(({ g }, h, kT) => {
-    const factor = negate(g, power(g, asScalar(kT!), -1));
-    const weight = operators.exponentialOfOperator(g, operators.scaleOperator(g, factor, asOperator(g, h!)));
+    const factor = negate(g, power(g, asScalar(kT), -1));
+    const weight = operators.exponentialOfOperator(g, operators.scaleOperator(g, factor, asOperator(g, h)));
     return operators.scaleOperator(g, power(g, operators.trace(g, weight), -1), weight);
   }),
 };

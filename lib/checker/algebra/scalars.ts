@@ -198,7 +198,7 @@ function sineOfTurns(g: Graph, c: Rational): Node | null {
 function cosineOfTurns(g: Graph, c: Rational): Node | null {
   if (c.big || c.d > 6 || c.d === 5) return null;
   // In twelfths of a half turn, folded into the first quarter.
-  let twelfths = ((((c.n * (12 / c.d)) % 24) + 24) % 24) as number;
+  let twelfths = (((c.n * (12 / c.d)) % 24) + 24) % 24;
   if (twelfths > 12) twelfths = 24 - twelfths;
   const sign = twelfths > 6 ? -1 : 1;
   if (sign < 0) twelfths = 12 - twelfths;

@@ -26,12 +26,17 @@ const SEARCH_POINTS = 48;
 /** A difference this many times its error bound is beyond rounding. */
 const MARGIN = 4;
 
+/**
+ * First whatever a witness in doubles shows, then the exact test, then, where both leave it open, the exponentials of the
+ * two sides, and at last a witness in many figures.
+ */
 export function decideEqual(g: Graph, pairs: readonly Pair[], points: SamplePoints, seed: number): Decision {
   const decision = decideDirectly(g, pairs, points, seed);
   if (decision.status !== 'undecided') return decision;
   const open = pairs.filter(([x, y]) => x !== y);
   const proof = sameByExponential(g, open, points, (others) => decideDirectly(g, others, points, seed));
-  return proof ? { status: 'equal', test: 'modular and numeric', proof } : decision;
+  if (proof) return { status: 'equal', test: 'modular and numeric', proof };
+  return preciseWitness(pairs, points) ?? decision;
 }
 
 function decideDirectly(g: Graph, pairs: readonly Pair[], points: SamplePoints, seed: number): Decision {
@@ -52,19 +57,23 @@ function decideDirectly(g: Graph, pairs: readonly Pair[], points: SamplePoints, 
   const found = search.upTo(SEARCH_POINTS, SEARCH_POINTS);
   if (found) return found;
   if (outcome.status === 'branches') return settleBranches(open, outcome, points, search.usable);
+  const reason =
+    outcome.status === 'failed' ? outcome.reason : 'the exact test and the numeric values do not settle it';
+  return { status: 'undecided', reason };
+}
+
+/** A witness that only many figures show. */
+function preciseWitness(pairs: readonly Pair[], points: SamplePoints): Decision | null {
   for (let k = 0, tried = 0; k < SEARCH_POINTS && tried < 2; k++) {
     const point = points.at(k);
     if (!point) continue;
     tried++;
-    for (let j = 0; j < pairs.length; j++) {
-      const [x, y] = pairs[j]!;
+    for (const [j, [x, y]] of pairs.entries()) {
       if (x !== y && highPrecisionDifference(point, x, y))
         return { status: 'different', point, pair: j, precise: true };
     }
   }
-  const reason =
-    outcome.status === 'failed' ? outcome.reason : 'the exact test and the numeric values do not settle it';
-  return { status: 'undecided', reason };
+  return null;
 }
 
 const proofOf = (o: Extract<ModularOutcome, { bound: number }>): Omit<Proof, 'points'> => ({

@@ -1,5 +1,5 @@
 import { type Graph, type Node, type Variable } from '../algebra/graph';
-import { toNumber, ZERO } from '../algebra/rational';
+import { toNumber } from '../algebra/rational';
 import { NumericPoint } from './numeric';
 import { Random } from './random';
 

@@ -16,7 +16,8 @@ export function formatNumber(x: number): string {
 export function formatComplex(re: number, im: number): string {
   const negligible = 1e-13 * Math.hypot(re, im);
   if (Math.abs(im) <= negligible) return formatNumber(re);
-  const imaginary = `${formatNumber(Math.abs(im))} i`;
+  const size = formatNumber(Math.abs(im));
+  const imaginary = size === '1' ? 'i' : `${size} i`;
   if (Math.abs(re) <= negligible) return im < 0 ? `-${imaginary}` : imaginary;
   return `${formatNumber(re)} ${im < 0 ? '-' : '+'} ${imaginary}`;
 }

@@ -10,6 +10,7 @@ const sentence = 'the commutator is taken in the other order';
 /** [B, A] was worked out for [A, B]. */
 export const commutatorOrder: TreeSlip = {
   type: 'tree',
+  needs: 'commutator',
   id,
   sentence,
   change: (tree) =>

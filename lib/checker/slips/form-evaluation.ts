@@ -21,9 +21,14 @@ export class FormEvaluation {
     this.g = point.graph;
     this.nodes = nodesUnder(this.g, roots);
     const size = (this.nodes[this.nodes.length - 1] ?? 0) + 1;
-    this.re = new Float64Array(size);
-    this.im = new Float64Array(size);
+    this.re = this.g.buffer(size);
+    this.im = this.g.buffer(size);
     point.evaluate(size - 1);
+  }
+
+  /** Whether there are sines, cosines, exponentials or roots, which a normal form may write otherwise. */
+  get hasFunctions(): boolean {
+    return this.nodes.some((node) => this.g.op[node]! >= Op.Root);
   }
 
   private readonly placesOf = new Map<FormChange, readonly Place[]>();

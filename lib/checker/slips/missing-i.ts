@@ -1,3 +1,4 @@
+import { featuresOf } from './features';
 import { type FormSlip, type RatioSlip, type TreeSlip, type Trial } from './slip';
 import { everywhereAndEach, numberNode } from './tree-changes';
 
@@ -10,6 +11,7 @@ export const missingI: FormSlip = { type: 'form', id, sentence, change: 'without
 /** The same on the author's tree, where it may stand before an operator that has its own. */
 export const missingIInTree: TreeSlip = {
   type: 'tree',
+  needs: 'i',
   id,
   sentence,
   change: (tree) =>
@@ -22,5 +24,5 @@ export const extraI: RatioSlip = {
   id,
   sentence,
   factors: (g) => [g.i],
-  applies: ({ referenceTree }: Trial) => missingIInTree.change(referenceTree).length === 0,
+  applies: ({ referenceTree }: Trial) => !featuresOf(referenceTree).i,
 };

@@ -32,7 +32,8 @@ export function looksEqual(kind: AnswerValue['kind'], options: CheckOptions, x: 
   if (ray && kind !== 'scalar' && kind !== 'vector') return sameRay(x, y, !options.upToScale || kind !== 'state');
   const scale = largest(x) + largest(y);
   for (let k = 0; k < n; k++) {
-    if (Math.abs(x.re[k]! - y.re[k]!) + Math.abs(x.im[k]! - y.im[k]!) > CLOSE * scale) return false;
+    const distance = Math.abs(x.re[k]! - y.re[k]!) + Math.abs(x.im[k]! - y.im[k]!);
+    if (!(distance <= CLOSE * scale)) return false;
   }
   return true;
 }
@@ -73,6 +74,6 @@ function near(x: Values, j: number, y: Values, k: number): boolean {
 function sameRay(x: Values, y: Values, sameNorm: boolean): boolean {
   const ratio = ratioOf(x, y);
   if (!ratio) return false;
-  if (sameNorm && Math.abs(Math.hypot(ratio.re, ratio.im) - 1) > CLOSE) return false;
+  if (sameNorm && !(Math.abs(Math.hypot(ratio.re, ratio.im) - 1) <= CLOSE)) return false;
   return looksEqual('vector', {}, scaledBy(x, ratio), y);
 }

@@ -1,40 +1,52 @@
-import { type Node } from '../algebra/graph';
 import { looksEqual, ratioOf, scaledBy, type Values } from './numeric-match';
 import { type Trial } from './slip';
 
-/** Whether the answer may be a given factor times the reference, judged at the trial's point. */
-export class Ratios {
-  private readonly ratios: readonly { readonly re: number; readonly im: number }[];
+interface Number2 {
+  readonly re: number;
+  readonly im: number;
+}
 
-  constructor(
-    private readonly trial: Trial,
-    reference: Values,
-    answer: Values,
-  ) {
-    const direct = ratioOf(reference, answer);
-    const candidates = direct ? [direct] : [];
-    if (trial.reference.kind === 'eigenvalues' && answer.re.length === 2) {
-      const swapped = ratioOf(reference, { re: [...answer.re].reverse(), im: [...answer.im].reverse() });
+const ONE_RATIO: Number2 = { re: 1, im: 0 };
+
+/** The factors by which an answer may differ from some values of a reference, judged at the trial's point. */
+export class Ratios {
+  private readonly ratios: readonly Number2[];
+  /** Nothing can be said: a tolerance or the rule of eigenpairs is in play. */
+  private readonly open: boolean;
+  private readonly upToPhase: boolean;
+
+  constructor({ reference, context }: Trial, values: Values, answer: Values) {
+    const { kind } = reference;
+    const { options } = context;
+    this.open = kind === 'eigenpairs' || options.tolerance !== undefined;
+    this.upToPhase = options.upToPhase === true && kind !== 'scalar' && kind !== 'vector';
+    const candidates: Number2[] = [];
+    const direct = ratioOf(values, answer);
+    if (direct && !this.open) candidates.push(direct);
+    if (kind === 'eigenvalues' && direct && answer.re.length === 2) {
+      const swapped = ratioOf(values, { re: [answer.re[1]!, answer.re[0]!], im: [answer.im[1]!, answer.im[0]!] });
       if (swapped) candidates.push(swapped);
     }
-    const { kind } = trial.reference;
-    this.ratios = candidates.filter((ratio) =>
-      looksEqual(kind, trial.context.options, scaledBy(reference, ratio), answer),
-    );
+    this.ratios = candidates.filter((ratio) => looksEqual(kind, options, scaledBy(values, ratio), answer));
   }
 
-  mayBe(factor: Node): boolean {
-    const { reference, context, point } = this.trial;
-    if (reference.kind === 'eigenpairs' || context.options.tolerance) return true;
-    if (this.ratios.length === 0) return false;
-    point.evaluate(factor);
-    const [re, im] = [point.re[factor]!, point.im[factor]!];
-    const phase = context.options.upToPhase && reference.kind !== 'scalar';
+  /** Whether the answer looks like a constant times the values. */
+  get isConstant(): boolean {
+    return this.open || this.ratios.length > 0;
+  }
+
+  mayBeOne(): boolean {
+    return this.mayBe(ONE_RATIO);
+  }
+
+  mayBe({ re, im }: Number2): boolean {
+    if (this.open) return true;
+    const size = Math.hypot(re, im);
     return this.ratios.some((ratio) => {
-      const distance = phase
-        ? Math.hypot(re, im) - Math.hypot(ratio.re, ratio.im)
+      const distance = this.upToPhase
+        ? size - Math.hypot(ratio.re, ratio.im)
         : Math.hypot(re - ratio.re, im - ratio.im);
-      return Math.abs(distance) < 1e-8 * (Math.hypot(re, im) + 1e-12);
+      return Math.abs(distance) <= 1e-8 * size;
     });
   }
 }

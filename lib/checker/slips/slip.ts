@@ -4,6 +4,7 @@ import { type NumericPoint } from '../equivalence/numeric';
 import { type AnswerValue } from '../kinds/answer-value';
 import { type Context } from '../kinds/comparison';
 import { type AnswerTree } from '../notation/answer-tree';
+import { type Features } from './features';
 import { type FormChange } from './form-change';
 
 /** What a slip is tried on. */
@@ -50,6 +51,8 @@ export interface FormSlip extends Named {
 /** A change of the form that needs the author's own tree, in which operators and functions are still to be seen. */
 export interface TreeSlip extends Named {
   readonly type: 'tree';
+  /** What the tree must hold for the slip to be tried. */
+  readonly needs: keyof Features;
   readonly change: (tree: AnswerTree) => readonly AnswerTree[];
 }
 

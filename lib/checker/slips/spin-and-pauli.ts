@@ -4,6 +4,7 @@ import { everywhereAndEach } from './tree-changes';
 /** σ stands where S should. */
 export const pauliForSpin: TreeSlip = {
   type: 'tree',
+  needs: 'spin',
   id: 'pauli-for-spin',
   sentence: 'a Pauli matrix stands where a spin operator should',
   change: (tree) =>
@@ -15,6 +16,7 @@ export const pauliForSpin: TreeSlip = {
 /** S stands where σ should. */
 export const spinForPauli: TreeSlip = {
   type: 'tree',
+  needs: 'pauli',
   id: 'spin-for-pauli',
   sentence: 'a spin operator stands where a Pauli matrix should',
   change: (tree) =>
