@@ -1,13 +1,15 @@
 /**
  * The checker's whole door: for server, worker and staff pages. Students' pages import `reader` alone.
  */
-import { type Computed, type ComputeError, type CheckOutcome } from './contract';
+import { type CheckRequest, type Computed, type ComputeError, type CheckOutcome } from './contract';
 import { decide } from './kinds/check';
+import { type EarlierAnswer, followThrough, type FollowThrough } from './kinds/follow-through';
 import { computeReference, type ComputeRequest } from './kinds/compute';
 import { isRecord, validateRequest } from './kinds/request';
 
 export type * from './contract';
 export type { ComputeRequest } from './kinds/compute';
+export type { EarlierAnswer, FollowThrough } from './kinds/follow-through';
 export { read, type Reading } from './reader';
 export { sentenceOf, slipIds } from './slips/sentences';
 
@@ -39,4 +41,14 @@ export function check(request: unknown, setting: CheckSetting = {}): CheckOutcom
 /** Works out a reference and prints it, as LaTeX and in the answer language. Never throws. */
 export function compute(request: ComputeRequest): Computed | ComputeError {
   return computeReference(request);
+}
+
+/**
+ * Checks a later part against its reference recomputed from the student's own earlier answers, which stand in it under
+ * names. A pure function of the request and the answers; never throws.
+ */
+export function checkFollowThrough(request: CheckRequest, earlier: readonly EarlierAnswer[]): FollowThrough {
+  const valid = validateRequest(request);
+  if ('error' in valid) return { outcome: { id: request.id, error: valid.error }, reference: '', degenerate: false };
+  return followThrough(valid.request, earlier);
 }

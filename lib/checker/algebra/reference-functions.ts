@@ -3,6 +3,7 @@ import { absoluteSquare, conjugate } from './conjugate';
 import { type Graph, type Node } from './graph';
 import * as operators from './operators';
 import { type Components, type Operator } from './operators';
+import { fromPolynomial, normalForm } from './normal-form';
 import { HALF, MINUS_ONE, rational } from './rational';
 import { ln, squareRoot } from './roots';
 import { add, cos, divide, exp, multiply, negate, power, scale, sin, subtract, sum } from './scalars';
@@ -90,8 +91,20 @@ function eigenpairs(c: ReferenceContext, matrix: Operator): Eigenpair[] {
   return [splitting, negate(g, splitting)].map((shift) => {
     const value = add(g, centre, shift);
     const state: Components = zero(m12) ? [subtract(g, value, m22), m21] : [m12, subtract(g, value, m11)];
-    return { value, state };
+    return { value, state: withoutCommonFactor(g, state) };
   });
+}
+
+/** (1, r) where the components' ratio is a constant, so that ħ and the like do not stand in a state. */
+function withoutCommonFactor(g: Graph, state: Components): Components {
+  if (state[0] === g.zero || state[1] === g.zero)
+    return [state[0] === g.zero ? g.zero : g.one, state[1] === g.zero ? g.zero : g.one];
+  const form = normalForm(g, divide(g, state[1], state[0]));
+  if (!form || form.size > 2) return state;
+  for (const { monomial } of form.values()) {
+    if (monomial.some(({ atom }) => atom !== g.i && !g.isNumber(atom))) return state;
+  }
+  return [g.one, fromPolynomial(g, form)];
 }
 
 /** e^{−iHt/ħ} (Sakurai & Napolitano §2.1). */

@@ -69,7 +69,8 @@ function rootOfForm(g: Graph, form: Polynomial, q: number, anyBranch: boolean): 
   const number = rootOfRational(g, sign, q);
   const total = multiply(g, number, outside);
   if (!negative) return inside === g.one ? total : multiply(g, total, canonicalRoot(g, inside, q));
-  if (q === 2 && (inside === g.one || anyBranch || signOf(g, inside) > 0)) {
+  const turns = anyBranch && (!rest || signOf(g, inside) > 0);
+  if (q === 2 && (inside === g.one || turns || signOf(g, inside) > 0)) {
     const turned = multiply(g, g.i, total);
     return inside === g.one ? turned : multiply(g, turned, canonicalRoot(g, inside, q));
   }
@@ -77,7 +78,9 @@ function rootOfForm(g: Graph, form: Polynomial, q: number, anyBranch: boolean): 
     const turn = exp(g, scale(g, rational(1, q), multiply(g, g.i, pi(g))));
     return multiply(g, multiply(g, turn, total), inside === g.one ? g.one : canonicalRoot(g, inside, q));
   }
-  return multiply(g, total, canonicalRoot(g, negate(g, inside), q));
+  // The sign is distributed, so that the radicand is a sum again.
+  const form = normalForm(g, negate(g, inside));
+  return multiply(g, total, canonicalRoot(g, form ? fromPolynomial(g, form) : negate(g, inside), q));
 }
 
 /** A node whose square is the form: a real one, or any with `anyBranch`; null where there is none in the same atoms. */

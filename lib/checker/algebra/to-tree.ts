@@ -4,18 +4,22 @@ import { fromPolynomial, normalForm } from './normal-form';
 import { TooLarge } from './polynomial';
 import { isNegative, isOne, negateRational, type Rational } from './rational';
 import { coefficientOf, withoutCoefficient } from './scalars';
+import { trigonometricForm } from './trigonometric-form';
 
 const span = { start: 0, end: 0 };
 const scalar = { span, type: 'scalar' } as const;
 
-/** A scalar node as a tree that reads well: as it was built or expanded, whichever is shorter. */
+/** A scalar node as a tree that reads well: as it was built, expanded, or by single angles, whichever is shortest. */
 export function scalarTree(g: Graph, node: Node): Expression {
   const built = treeOf(g, node);
   const form = normalForm(g, node);
   if (!form) return built;
   try {
-    const expanded = treeOf(g, fromPolynomial(g, form));
-    return complexity(expanded) < complexity(built) ? expanded : built;
+    const trigonometric = trigonometricForm(g, form);
+    const others = [fromPolynomial(g, form), ...(trigonometric === null ? [] : [trigonometric])];
+    return others
+      .map((other) => treeOf(g, other))
+      .reduce((best, tree) => (complexity(tree) < complexity(best) ? tree : best), built);
   } catch (error) {
     if (error instanceof TooLarge) return built;
     throw error;

@@ -1,5 +1,5 @@
 import { type Graph, type Node } from '../algebra/graph';
-import { highPrecisionDifference } from './high-precision';
+import { highPrecisionDifference, type PreciseSides } from './high-precision';
 import { type ModularOutcome, modularTest } from './modular';
 import { type NumericPoint } from './numeric';
 import { type Proof } from './proof';
@@ -17,7 +17,12 @@ export type Decision =
       readonly test: 'normal form' | 'modular' | 'modular and numeric';
       readonly proof: Proof;
     }
-  | { readonly status: 'different'; readonly point: NumericPoint; readonly pair: number; readonly precise: boolean }
+  | {
+      readonly status: 'different';
+      readonly point: NumericPoint;
+      readonly pair: number;
+      readonly precise: PreciseSides | null;
+    }
   | { readonly status: 'undecided'; readonly reason: string };
 
 const NO_POINT = 'no point was found at which both sides are defined';
@@ -69,8 +74,8 @@ function preciseWitness(pairs: readonly Pair[], points: SamplePoints): Decision 
     if (!point) continue;
     tried++;
     for (const [j, [x, y]] of pairs.entries()) {
-      if (x !== y && highPrecisionDifference(point, x, y))
-        return { status: 'different', point, pair: j, precise: true };
+      const precise = x === y ? null : highPrecisionDifference(point, x, y);
+      if (precise) return { status: 'different', point, pair: j, precise };
     }
   }
   return null;
@@ -101,7 +106,7 @@ class Search {
       const pair = differingPair(this.pairs, point);
       if (pair === 'unknown') continue;
       this.usable++;
-      if (pair !== null) return { status: 'different', point, pair, precise: false };
+      if (pair !== null) return { status: 'different', point, pair, precise: null };
     }
     return null;
   }

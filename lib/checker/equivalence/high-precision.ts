@@ -32,20 +32,36 @@ const ON_CUT = 1e-40;
  * Whether two nodes differ, at the point of the double evaluation, in the first 80 figures of what enters them, by the
  * same amount at two precisions.
  */
-export function highPrecisionDifference(point: NumericPoint, x: Node, y: Node): boolean {
+export function highPrecisionDifference(point: NumericPoint, x: Node, y: Node): PreciseSides | null {
   const distances: Real[] = [];
+  let sides: PreciseSides | null = null;
   for (const precision of PRECISIONS) {
     D.set({ precision });
     const evaluation = new HighPrecision(point.graph, point.values);
     const left = evaluation.value(x);
     const right = evaluation.value(y);
-    if (!left || !right) return false;
+    if (!left || !right) return null;
     const distance = size({ re: left.re.minus(right.re), im: left.im.minus(right.im) });
-    if (!distance.greaterThan(evaluation.largest.times(new D(10).pow(-TRUSTED_FIGURES)))) return false;
+    if (!distance.greaterThan(evaluation.largest.times(new D(10).pow(-TRUSTED_FIGURES)))) return null;
     distances.push(distance);
+    sides = { reference: show(left, distance), answer: show(right, distance) };
   }
   const [first, second] = distances;
-  return first !== undefined && second !== undefined && first.minus(second).abs().lessThan(second.div(1000));
+  const stable = first !== undefined && second !== undefined && first.minus(second).abs().lessThan(second.div(1000));
+  return stable ? sides : null;
+}
+
+/** Both sides at a witness, in as many figures as show the difference. */
+export interface PreciseSides {
+  readonly reference: string;
+  readonly answer: string;
+}
+
+/** A value to three places beyond the first in which it differs. */
+function show({ re, im }: Complex, distance: Real): string {
+  const places = Math.max(0, -distance.e + 2);
+  const text = (x: Real): string => x.toDecimalPlaces(places).toString();
+  return im.abs().lessThan(distance.div(100)) ? text(re) : `${text(re)} + ${text(im)} i`;
 }
 
 class HighPrecision {

@@ -87,12 +87,14 @@ function differing(
     ({ pair: [x, y] }, k) => k === decision.pair || (x !== y && !decision.precise && differsAt(point, x, y)),
   );
   const places = wrong.map((element) => element.place).filter((place) => place.length > 0);
-  const sides = describe
-    ? describe(point)
-    : { reference: formatValue(point, first.pair[0]), answer: formatValue(point, first.pair[1]) };
+  const sides = decision.precise
+    ? decision.precise
+    : describe
+      ? describe(point)
+      : { reference: formatValue(point, first.pair[0]), answer: formatValue(point, first.pair[1]) };
   const witness: Witness = {
     values: witnessValues(context.environment, point, first.pair),
-    element: describe ? '' : first.label,
+    element: describe && !decision.precise ? '' : first.label,
     ...sides,
   };
   const test: EvidenceTest = decision.precise ? 'high-precision witness' : 'witness';

@@ -6,8 +6,8 @@ import { type AnswerTree, type LabelledValue } from '../notation/answer-tree';
 import { parse } from '../notation/parse';
 import { printLatex } from '../notation/print-latex';
 import { seedOf } from '../equivalence/random';
-import { normalTree } from '../slips/normal-tree';
 import { answerValue } from './answer-value';
+import { normalTree } from './normal-tree';
 import { BadRequest, failureOf, prepare } from './prepare';
 
 /** A reference to be worked out. */

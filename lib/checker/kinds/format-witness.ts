@@ -25,18 +25,16 @@ export function formatComplex(re: number, im: number): string {
 /** Value of a node at an evaluated point. */
 export const formatValue = (point: NumericPoint, node: Node): string => formatComplex(point.re[node]!, point.im[node]!);
 
-/** Values of the symbols on which the nodes rest, by declared name; ħ as `hbar`. */
+/** Values at a point of the symbols that the texts name, by declared name; ħ (as `hbar`) where the nodes rest on it. */
 export function witnessValues(
   environment: Environment,
   point: NumericPoint,
   nodes: readonly Node[],
 ): Record<string, string> {
-  const { g, solutions } = environment;
-  const used = variablesUnder(environment, nodes);
+  const { g, solutions, hbar } = environment;
   const parts = new Map<string, { re: number; im: number }>();
-  for (const index of used) {
-    const { name, part } = g.variables[index]!;
-    if (name === '') continue;
+  for (const [index, { name, part }] of g.variables.entries()) {
+    if (name === '' || (index === g.a[hbar] && !restsOn(environment, nodes, hbar))) continue;
     const solution = solutions.get(index);
     let value = point.values[index]!;
     if (solution !== undefined) {
@@ -51,28 +49,16 @@ export function witnessValues(
   return values;
 }
 
-/** Indices of the variables under some nodes, with those that an assumption determines among them. */
-function variablesUnder({ g, solutions }: Environment, nodes: readonly Node[]): number[] {
-  const marks = new Uint8Array(g.size);
-  let last = 0;
-  for (const node of nodes) {
-    marks[node] = 1;
-    last = Math.max(last, node);
-  }
-  const found = new Set<number>();
-  for (let node = last; node >= 0; node--) {
-    if (marks[node] === 0) continue;
+/** Whether one of the nodes rests on a variable. */
+function restsOn({ g }: Environment, nodes: readonly Node[], variable: Node): boolean {
+  const last = Math.max(...nodes);
+  const marks = new Uint8Array(last + 1);
+  for (const node of nodes) marks[node] = 1;
+  for (let node = last; node > variable; node--) {
     const op = g.op[node]!;
-    const a = g.a[node]!;
-    if (op === Op.Symbol) {
-      found.add(a);
-      const solution = g.solved.get(a);
-      if (solution !== undefined) marks[solution] = 1;
-    } else if (op >= Op.Add) {
-      marks[a] = 1;
-      if (op === Op.Add || op === Op.Multiply) marks[g.b[node]!] = 1;
-    }
+    if (marks[node] === 0 || op < Op.Add) continue;
+    marks[g.a[node]!] = 1;
+    if (op === Op.Add || op === Op.Multiply) marks[g.b[node]!] = 1;
   }
-  for (const [index, solution] of solutions) if (marks[solution] === 1) found.add(index);
-  return [...found].sort((x, y) => x - y);
+  return marks[variable] === 1;
 }

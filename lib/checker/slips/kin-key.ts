@@ -2,7 +2,7 @@ import { type Node } from '../algebra/graph';
 import { fromPauli, identityTimes, addOperators, pauliCoefficients } from '../algebra/operators';
 import { type Rational, rational, rationalKey } from '../algebra/rational';
 import { rootOfRational } from '../algebra/roots';
-import { multiply, negate } from '../algebra/scalars';
+import { multiply, negate, power } from '../algebra/scalars';
 import { type AnswerValue } from '../kinds/answer-value';
 import { nodesOf } from '../kinds/compare';
 import { type Context } from '../kinds/comparison';
@@ -112,17 +112,20 @@ function operatorKey(context: Context, reference: AnswerValue, answer: AnswerVal
   const wanted = pauliCoefficients(g, reference.matrix);
   const given = pauliCoefficients(g, answer.matrix);
   point.evaluate(Math.max(...wanted, ...given));
-  const difference = { re: point.re[given[0]]! - point.re[wanted[0]]!, im: point.im[given[0]]! - point.im[wanted[0]]! };
-  const shifted = constantKey(
-    context,
-    difference,
-    (c) => {
-      const matrix = addOperators(g, reference.matrix, identityTimes(g, c));
-      return compare({ kind: reference.kind, matrix }, answer);
-    },
-    'identity',
-  );
-  if (shifted !== null) return shifted;
+  const size = point.re[context.environment.hbar]!;
+  for (const n of [0, 1, 2]) {
+    const scale = size ** n;
+    const difference = {
+      re: (point.re[given[0]]! - point.re[wanted[0]]!) / scale,
+      im: (point.im[given[0]]! - point.im[wanted[0]]!) / scale,
+    };
+    const confirm = (c: Node): boolean => {
+      const shift = identityTimes(g, multiply(g, c, power(g, context.environment.hbar, n)));
+      return compare({ kind: reference.kind, matrix: addOperators(g, reference.matrix, shift) }, answer);
+    };
+    const shifted = constantKey(context, difference, confirm, n === 0 ? 'identity' : `identity*hbar^${n}`);
+    if (shifted !== null) return shifted;
+  }
   const seen = valuesOf(point, wanted.slice(1));
   const typed = valuesOf(point, given.slice(1));
   for (const order of permutations) {

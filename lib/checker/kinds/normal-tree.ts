@@ -1,6 +1,7 @@
+import { pauliCoefficients } from '../algebra/operators';
 import { scalarTree } from '../algebra/to-tree';
-import { type AnswerValue } from '../kinds/answer-value';
-import { type Context } from '../kinds/comparison';
+import { type AnswerValue } from './answer-value';
+import { type Context } from './comparison';
 import { type AnswerTree, type LabelledValue } from '../notation/answer-tree';
 import { type Expression } from '../notation/tree';
 
@@ -13,8 +14,11 @@ export function normalTree({ environment }: Context, value: AnswerValue): Answer
   switch (value.kind) {
     case 'scalar':
       return tree(value.node);
-    case 'operator':
     case 'pauli': {
+      const entries = pauliCoefficients(g, value.matrix).map(tree);
+      return { span, type: 'list', node: 'list', bracket: '(', entries };
+    }
+    case 'operator': {
       const [a, b, c, d] = value.matrix;
       return {
         span,
