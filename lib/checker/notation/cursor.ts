@@ -140,16 +140,16 @@ export class Cursor {
   }
 
   /** Goes one level deeper; false, with a problem, where that is too deep. */
-  enter(levels = 1): boolean {
-    this.depth += levels;
+  enter(): boolean {
+    this.depth += 1;
     if (this.depth <= maximumDepth) return true;
     const { start, end } = this.peek();
     this.fail('too-deep', { start, end }, `This is nested more than ${maximumDepth} deep.`);
     return false;
   }
 
-  leave(levels = 1): void {
-    this.depth -= levels;
+  leave(): void {
+    this.depth -= 1;
   }
 
   /** Notes that a choice has another common reading. */

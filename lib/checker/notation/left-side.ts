@@ -52,29 +52,31 @@ function isLeftSide(tokens: readonly Token[], from: number, to: number): boolean
     index += 1;
     while (index < to && isName(tokens[index]) && tokens[index]?.spaced === false) index += 1;
     if (index === to || (index === to - 1 && isSign(tokens[index]))) return true;
-    return tokens[index]?.kind === '(' && closesAt(tokens, index) === to - 1;
+    return tokens[index]?.kind === '(' && isWrapped(tokens, index, to);
   }
   if (first.kind === 'ket' || first.kind === 'bra' || first.kind === 'named-ket') return to === from + 1;
   if (first.kind === '<') return tokens[to - 1]?.kind === '>';
-  return nesting(first) > 0 && closesAt(tokens, from) === to - 1;
+  return isWrapped(tokens, from, to);
 }
 
 function isName(token: Token | undefined): boolean {
-  if (token?.kind === 'unknown') return true;
+  if (token?.kind === 'unknown') return token.reason !== 'bad-index';
   const is = token?.kind === 'word' ? token.meaning?.is : undefined;
   return is === 'symbol' || is === 'operator' || is === 'constant' || is === 'identity';
 }
 
-/** The position of the bracket that closes the one at a position. */
-export function closesAt(tokens: readonly Token[], open: number): number {
+/** Whether a range is one pair of brackets of the same sort with what they hold. */
+export function isWrapped(tokens: readonly Token[], from: number, to: number): boolean {
+  const open = tokens[from]?.kind;
+  const close = open === '(' ? ')' : open === '[' ? ']' : open === '{' ? '}' : null;
+  if (close === null || to < from + 2 || tokens[to - 1]?.kind !== close) return false;
   let depth = 0;
-  for (let index = open; index < tokens.length; index += 1) {
+  for (let index = from; index < to; index += 1) {
     const token = tokens[index];
-    if (token === undefined) break;
-    depth += nesting(token);
-    if (depth <= 0) return index;
+    if (token) depth += nesting(token);
+    if (depth <= 0) return index === to - 1;
   }
-  return -1;
+  return false;
 }
 
 function labelOf(tokens: readonly Token[], from: number, to: number): Label | null {

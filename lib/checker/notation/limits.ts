@@ -10,6 +10,13 @@ export const maximumLength = 4000;
 export const maximumDepth = 100;
 
 /**
+ * Most powers, daggers and the like directly after one operand. Nobody needs more than two or three; each makes the tree
+ * deeper without a bracket, so that this limit keeps the depth of a tree within a small multiple of `maximumDepth`.
+ * Diagnostic `too-deep`.
+ */
+export const maximumMarks = 8;
+
+/**
  * Most nodes of a tree. A text yields about one node a character; superscripts can yield more. The limit bounds the
  * work of everything downstream. Diagnostic `too-many-nodes`.
  */

@@ -1,5 +1,6 @@
 /** Powers and the other marks that stand after what they act on. */
 import { choices, type Cursor } from './cursor';
+import { maximumMarks } from './limits';
 import { numberNode } from './parse-number';
 import { exponentGoesOn, parseLongExponent } from './parse-run';
 import { isSign, parseSigned } from './parse-sign';
@@ -17,16 +18,18 @@ export function parsePower(cursor: Cursor): Expression {
   if (recalled) return recalled;
   if (!cursor.enter()) return cursor.fail('too-deep', cursor.peek(), '');
   let base = cursor.grammar.primary(cursor);
+  cursor.leave();
   let marks = 0;
   for (;;) {
     const token = cursor.peek();
     const { kind } = token;
     if (kind !== '^' && kind !== 'superscript' && kind !== 'dagger' && kind !== 'transpose' && kind !== 'prime') break;
     marks += 1;
+    if (marks > maximumMarks) return cursor.fail('too-deep', token, 'Too many marks stand after one another here.');
     cursor.enter();
     base = parseMark(cursor, base, token);
+    cursor.leave();
   }
-  cursor.leave(marks + 1);
   return base;
 }
 

@@ -53,7 +53,7 @@ export function parsePrimary(cursor: Cursor): Expression {
     case 'bar-open':
       return parseBars(cursor);
     case '<':
-      return angle(cursor, token);
+      return token.text === '⟨' ? angle(cursor, token) : missing(cursor, token);
     default:
       return missing(cursor, token);
   }

@@ -1,7 +1,7 @@
 /** Answers that are two values or two pairs. */
 import { type AnswerTree, type LabelledValue, type PairEntry, type ValuesNode } from './answer-tree';
 import { type Cursor } from './cursor';
-import { closesAt, outsideBrackets, passLeftSide } from './left-side';
+import { isWrapped, outsideBrackets, passLeftSide } from './left-side';
 import { type Token } from './token';
 import { type Expression } from './tree';
 import { nameOfType } from './typing';
@@ -16,14 +16,12 @@ export function parseValues(cursor: Cursor, end: number): AnswerTree | null {
   const { tokens } = cursor;
   let from = 0;
   const equals = outsideBrackets(tokens, 0, end, '=');
-  const only = equals[0];
-  const opening = tokens[only === undefined ? 0 : only + 1];
-  const wrappedAfter = opening && isOpening(opening) && closesAt(tokens, (only ?? -1) + 1) === end - 1;
-  if (equals.length === 1 && only !== undefined && (wrappedAfter || nestedLeft(tokens, only))) {
+  const [only] = equals;
+  if (only !== undefined && equals.length === 1 && (isWrapped(tokens, only + 1, end) || isWrapped(tokens, 0, only))) {
     from = passLeftSide(cursor, 0, end).from;
   }
   const open = tokens[from];
-  const wrapped = open && isOpening(open) && closesAt(tokens, from) === end - 1 ? open.kind : null;
+  const wrapped = open && isWrapped(tokens, from, end) ? open.kind : null;
   if (open && wrapped !== null && (wrapped === '{' || isSeparated(tokens, from + 1, end - 1))) {
     const bracket = wrapped === '{' ? '{' : wrapped === '[' ? '[' : '(';
     const entries = parseEntries(cursor, from + 1, end - 1);
@@ -40,15 +38,6 @@ export function parseValues(cursor: Cursor, end: number): AnswerTree | null {
   if (first && !separated && first.value.type === 'list') return first.value;
   const span = { start: first?.span.start ?? 0, end: entries[entries.length - 1]?.span.end ?? 0 };
   return valuesOf(cursor, { node: 'values', span, bracket: 'none', entries });
-}
-
-function isOpening(token: Token): boolean {
-  return token.kind === '{' || token.kind === '(' || token.kind === '[';
-}
-
-function nestedLeft(tokens: readonly Token[], equals: number): boolean {
-  const first = tokens[0];
-  return first !== undefined && isOpening(first) && closesAt(tokens, 0) === equals - 1;
 }
 
 function isSeparated(tokens: readonly Token[], from: number, to: number): boolean {
@@ -104,18 +93,9 @@ function valuesOf(cursor: Cursor, values: ValuesNode): ValuesNode | null {
 export function parsePairs(cursor: Cursor, end: number): AnswerTree | null {
   cursor.plusMinus = true;
   const { tokens } = cursor;
-  const open = tokens[0];
-  let from = 0;
-  let to = end;
-  if (
-    open &&
-    isOpening(open) &&
-    closesAt(tokens, 0) === end - 1 &&
-    outsideBrackets(tokens, 1, end - 1, ':').length > 0
-  ) {
-    from = 1;
-    to = end - 1;
-  }
+  const wrapped = isWrapped(tokens, 0, end) && outsideBrackets(tokens, 1, end - 1, ':').length > 0;
+  const from = wrapped ? 1 : 0;
+  const to = wrapped ? end - 1 : end;
   if (outsideBrackets(tokens, from, to, ':').length === 0) {
     const value = cursor.within(from, to, () => cursor.grammar.sum(cursor));
     if (cursor.problem === null && value.type === 'pairs') return value;
