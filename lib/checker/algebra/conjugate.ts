@@ -1,6 +1,7 @@
 import { Flag, type Graph, type Node, Op } from './graph';
 import { HALF, rational } from './rational';
-import { absolute, ln, root } from './roots';
+import { absolute, root } from './roots';
+import { ln } from './logarithm';
 import { add, cos, divide, exp, multiply, negate, power, scale, sin, subtract } from './scalars';
 
 /**

@@ -1,6 +1,7 @@
 import { Flag, type Graph, type Node } from './graph';
 import { HALF, MINUS_ONE, rational } from './rational';
-import { ln, root, squareRoot } from './roots';
+import { root, squareRoot } from './roots';
+import { ln } from './logarithm';
 import { add, cos, divide, exp, multiply, negate, pi, power, scale, sin, subtract } from './scalars';
 
 /**

@@ -11,7 +11,9 @@ import { type Graph, type Node } from './graph';
 import * as operators from './operators';
 import { type Components, type Operator } from './operators';
 import { bigRational, HALF, type Rational, rational } from './rational';
-import { ln, root, rootOfRational } from './roots';
+import { root } from './roots';
+import { ln } from './logarithm';
+import { rootOfRational } from './root-of-rational';
 import { add, cos, exp, multiply, negate, pi, power, scale, sin } from './scalars';
 import {
   asOperator,

@@ -5,7 +5,8 @@ import * as operators from './operators';
 import { type Components, type Operator } from './operators';
 import { fromPolynomial, normalForm } from './normal-form';
 import { HALF, MINUS_ONE, rational } from './rational';
-import { ln, squareRoot } from './roots';
+import { squareRoot } from './roots';
+import { ln } from './logarithm';
 import { add, cos, divide, exp, multiply, negate, power, scale, sin, subtract, sum } from './scalars';
 import {
   asKet,

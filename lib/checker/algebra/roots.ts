@@ -1,10 +1,9 @@
 import { contentOf } from './content';
-import { Flag, type Graph, type Node, Op, POSITIVE } from './graph';
+import { Flag, type Graph, type Node, Op } from './graph';
 import { expandIn, fromPolynomial, isRealPolynomial, monomialNode, normalForm } from './normal-form';
 import { fromAtom, fromMonomial, type Polynomial, type Power, scaled, times, TooLarge } from './polynomial';
 import {
   compareRational,
-  equalRational,
   isNegative,
   multiplyRational,
   negateRational,
@@ -12,7 +11,8 @@ import {
   type Rational,
   rational,
 } from './rational';
-import { add, coefficientOf, DefinedNowhere, exp, multiply, negate, pi, power, scale } from './scalars';
+import { rootOfRational } from './root-of-rational';
+import { add, coefficientOf, exp, multiply, negate, pi, power, scale } from './scalars';
 import { signOf } from './sign';
 import { squareRootOfPolynomial } from './square-root-of-polynomial';
 
@@ -79,8 +79,8 @@ function rootOfForm(g: Graph, form: Polynomial, q: number, anyBranch: boolean): 
     return multiply(g, multiply(g, turn, total), inside === g.one ? g.one : canonicalRoot(g, inside, q));
   }
   // The sign is distributed, so that the radicand is a sum again.
-  const form = normalForm(g, negate(g, inside));
-  return multiply(g, total, canonicalRoot(g, form ? fromPolynomial(g, form) : negate(g, inside), q));
+  const turned = normalForm(g, negate(g, inside));
+  return multiply(g, total, canonicalRoot(g, turned ? fromPolynomial(g, turned) : negate(g, inside), q));
 }
 
 /** A node whose square is the form: a real one, or any with `anyBranch`; null where there is none in the same atoms. */
@@ -109,7 +109,7 @@ function canonicalRoot(g: Graph, inside: Node, q: number): Node {
   );
 }
 
-function canonicalFactor(g: Graph, p: Polynomial): Node {
+export function canonicalFactor(g: Graph, p: Polynomial): Node {
   const node = fromPolynomial(g, p);
   const sign = signOf(g, node);
   if (sign > 0) g.mark(node, Flag.Real | Flag.NonNegative);
@@ -118,7 +118,7 @@ function canonicalFactor(g: Graph, p: Polynomial): Node {
 }
 
 /** Content, common monomial and primitive rest (null for 1) of a form. Phases e^{iθ} are not drawn out. */
-function factorsOf(g: Graph, form: Polynomial): { content: Rational; common: Power[]; rest: Polynomial | null } {
+export function factorsOf(g: Graph, form: Polynomial): { content: Rational; common: Power[]; rest: Polynomial | null } {
   if (form.size === 1) {
     const [only] = form.values();
     if (only) return { content: only.coefficient, common: [...only.monomial], rest: null };
@@ -163,45 +163,6 @@ function drawOut(g: Graph, { atom, exponent }: Power, q: number, anyBranch: bool
   return { outside, inside: odd === 0 ? g.one : atom };
 }
 
-/** Positive rational to the power 1/q, prime by prime. */
-export function rootOfRational(g: Graph, c: Rational, q: number): Node {
-  if (isNegative(c)) return g.node(Op.Root, g.number(c), q, Flag.NonZero);
-  if (c.big) return g.node(Op.Root, g.number(c), q, POSITIVE);
-  let node = g.one;
-  for (const [prime, exponent] of [...primePowers(c.n, 1), ...primePowers(c.d, -1)]) {
-    const whole = Math.floor(exponent / q);
-    node = multiply(g, node, power(g, g.integer(prime), whole));
-    const rest = exponent - whole * q;
-    if (rest === 0) continue;
-    const common = greatestCommon(rest, q);
-    const degree = q / common;
-    node = multiply(g, node, power(g, g.node(Op.Root, g.integer(prime), degree, POSITIVE), rest / common));
-  }
-  return node;
-}
-
-const greatestCommon = (a: number, b: number): number => (b === 0 ? a : greatestCommon(b, a % b));
-
-/** Prime powers of n; a cofactor without divisor below the trial limit counts as a prime. */
-function primePowers(n: number, sign: 1 | -1): [number, number][] {
-  const powers: [number, number][] = [];
-  let rest = n;
-  for (let p = 2; p * p <= rest && p < 3000; p += p === 2 ? 1 : 2) {
-    let exponent = 0;
-    while (rest % p === 0) {
-      rest /= p;
-      exponent++;
-    }
-    if (exponent > 0) powers.push([p, sign * exponent]);
-  }
-  if (rest > 1) {
-    const square = Math.round(Math.sqrt(rest));
-    if (square * square === rest) powers.push([square, 2 * sign]);
-    else powers.push([rest, sign]);
-  }
-  return powers;
-}
-
 /** |x| of a real x. */
 export function absolute(g: Graph, x: Node): Node {
   const sign = signOf(g, x);
@@ -231,70 +192,4 @@ export function absolute(g: Graph, x: Node): Node {
 
 function absoluteNode(g: Graph, x: Node): Node {
   return g.node(Op.Abs, x, 0, Flag.Real | Flag.NonNegative | (g.flags[x]! & Flag.NonZero));
-}
-
-/** Principal natural logarithm; of products of positive factors the sum of theirs. */
-export function ln(g: Graph, x: Node): Node {
-  if (x === g.one) return g.zero;
-  if (x === g.zero) throw new DefinedNowhere('logarithm of zero');
-  if (g.op[x] === Op.Exp && g.has(g.a[x]!, Flag.Real)) return g.a[x]!;
-  const form = normalForm(g, x);
-  if (!form || form.size === 0) return g.node(Op.Ln, x, 0, realLog(g, x));
-  const turn = turnOfUnit(g, form);
-  if (turn) return scale(g, turn, multiply(g, g.i, pi(g)));
-  const { content, common, rest } = factorsOf(g, form);
-  const positive = common.every(
-    ({ atom, exponent }) =>
-      g.has(atom, Flag.NonNegative) ||
-      (g.op[atom] === Op.Exp && g.has(g.a[atom]!, Flag.Real)) ||
-      (g.has(atom, Flag.Real) && isEven(exponent)),
-  );
-  const restNode = rest ? canonicalFactor(g, rest) : null;
-  if (!positive || (restNode !== null && signOf(g, restNode) <= 0 && common.length > 0)) {
-    return g.node(Op.Ln, x, 0, realLog(g, x));
-  }
-  if (restNode !== null && signOf(g, restNode) <= 0) return g.node(Op.Ln, fromPolynomial(g, form), 0, realLog(g, x));
-  let total = lnOfRational(g, isNegative(content) ? negateRational(content) : content);
-  if (isNegative(content)) total = add(g, total, multiply(g, g.i, pi(g)));
-  for (const { atom, exponent } of common) {
-    const single = g.op[atom] === Op.Exp ? g.a[atom]! : g.node(Op.Ln, absolute(g, atom), 0, Flag.Real);
-    total = add(g, total, scale(g, exponent, single));
-  }
-  return restNode === null ? total : add(g, total, g.node(Op.Ln, restNode, 0, Flag.Real));
-}
-
-/** c where the form is e^{iπc} for a twelfth-circle c in (−1, 1], else null. */
-function turnOfUnit(g: Graph, form: Polynomial): Rational | null {
-  if (form.size > 2) return null;
-  for (const { monomial } of form.values()) {
-    if (monomial.some(({ atom }) => atom !== g.i && !g.isNumber(atom))) return null;
-  }
-  for (const twelfth of [12, 2, 3, 4, 6, 8, 9, 10, -2, -3, -4, -6, -8, -9, -10]) {
-    const c = rational(twelfth, 12);
-    const unit = normalForm(g, exp(g, scale(g, c, multiply(g, g.i, pi(g)))));
-    if (unit && equalForms(unit, form)) return c;
-  }
-  return null;
-}
-
-function equalForms(p: Polynomial, q: Polynomial): boolean {
-  if (p.size !== q.size) return false;
-  for (const [key, term] of p) {
-    const other = q.get(key);
-    if (!other || !equalRational(other.coefficient, term.coefficient)) return false;
-  }
-  return true;
-}
-
-const isEven = (x: Rational): boolean => !x.big && x.d === 1 && x.n % 2 === 0;
-
-const realLog = (g: Graph, x: Node): number => (g.has(x, Flag.NonNegative) ? Flag.Real : 0);
-
-function lnOfRational(g: Graph, c: Rational): Node {
-  if (c.big) return g.node(Op.Ln, g.number(c), 0, Flag.Real);
-  let total = g.zero;
-  for (const [prime, exponent] of [...primePowers(c.n, 1), ...primePowers(c.d, -1)]) {
-    total = add(g, total, scale(g, rational(exponent), g.node(Op.Ln, g.integer(prime), 0, Flag.Real)));
-  }
-  return total;
 }

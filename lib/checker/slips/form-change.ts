@@ -1,5 +1,6 @@
 import { type Graph, type Node, Op } from '../algebra/graph';
-import { absolute, ln, root } from '../algebra/roots';
+import { absolute, root } from '../algebra/roots';
+import { ln } from '../algebra/logarithm';
 import { rational } from '../algebra/rational';
 import { add, cos, exp, multiply, power, scale, sin } from '../algebra/scalars';
 

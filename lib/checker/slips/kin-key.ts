@@ -1,7 +1,7 @@
 import { type Node } from '../algebra/graph';
 import { fromPauli, identityTimes, addOperators, pauliCoefficients } from '../algebra/operators';
 import { type Rational, rational, rationalKey } from '../algebra/rational';
-import { rootOfRational } from '../algebra/roots';
+import { rootOfRational } from '../algebra/root-of-rational';
 import { multiply, negate, power } from '../algebra/scalars';
 import { type AnswerValue } from '../kinds/answer-value';
 import { nodesOf } from '../kinds/compare';
