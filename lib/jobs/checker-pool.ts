@@ -28,9 +28,11 @@ export type ThreadFailure = { failed: true; requestId: string };
 
 /**
  * Checks requests in a worker thread, in order. Where the thread hangs or dies they are tried once more one by one, and
- * only the one at fault comes back as a failure.
+ * only the one at fault comes back as a failure. Throws where no thread can be had at all: that is no answer's fault, and
+ * the job is to be tried again.
  */
 export async function checkInThread(requests: readonly CheckRequest[]): Promise<(ThreadResult | ThreadFailure)[]> {
+  await runBounded([]);
   try {
     return await runBounded(requests);
   } catch (error) {
