@@ -5,7 +5,10 @@ import { TimeStamp } from '@/components/ui/time-stamp';
 import { paths } from '@/lib/paths';
 import { type OwnSetLine } from '@/lib/presenters/own-sets';
 
-/** The sets in one state, a row each, how much is submitted in the margin; nothing where there are none. */
+/**
+ * The sets in one state, a row each, how much is submitted in the margin; nothing where there are none. The links are not
+ * fetched beforehand: opening a set is what draws its questions.
+ */
 export function SetLines({ heading, lines }: { heading: string; lines: readonly OwnSetLine[] }) {
   return lines.map((line, index) => (
     <Section key={line.setId} label={line.name} margin={<Progress line={line} />}>
@@ -14,7 +17,7 @@ export function SetLines({ heading, lines }: { heading: string; lines: readonly 
         {line.course.code} · {line.course.title}
       </p>
       <p className="text-lead font-semibold">
-        <Link href={paths.workSet(line.setId)}>
+        <Link href={paths.workSet(line.setId)} prefetch={false}>
           {line.name}
           <LinkPending />
         </Link>
@@ -24,7 +27,7 @@ export function SetLines({ heading, lines }: { heading: string; lines: readonly 
       </p>
       {line.state === 'released' ? (
         <p className="mt-1.5">
-          <Link href={paths.workReport(line.setId)}>
+          <Link href={paths.workReport(line.setId)} prefetch={false}>
             Read the score report
             <LinkPending />
           </Link>
