@@ -79,12 +79,17 @@ export function isWrapped(tokens: readonly Token[], from: number, to: number): b
   return false;
 }
 
+/** The label that names make, or null where they make none that could be shown back. */
 function labelOf(tokens: readonly Token[], from: number, to: number): Label | null {
   const sign = isSign(tokens[to - 1]) ? (tokens[to - 1]?.kind ?? null) : null;
   const end = sign === null ? to : to - 1;
   const last = tokens[end - 1];
   if (!isName(last) || last === undefined) return null;
   let base = '';
-  for (let index = from; index < end; index += 1) base += tokens[index]?.text ?? '';
-  return { base, index: last.index ?? sign };
+  for (let index = from; index < end; index += 1) {
+    base += tokens[index]?.text ?? '';
+    if (index < end - 1 && tokens[index]?.index !== null) return null;
+  }
+  const printable = [...base].length === 1 || /^[A-Za-z]+$/.test(base);
+  return printable ? { base, index: last.index ?? sign } : null;
 }

@@ -56,7 +56,7 @@ function parseFactor(cursor: Cursor): Expression {
 function parseJoined(cursor: Cursor, join: Join, last: Expression): Expression {
   if (join === 'unwritten') {
     refuseNumbers(cursor, last);
-    const body = cursor.grammar.power(cursor);
+    const body = parseFactor(cursor);
     refuseMixed(cursor, last, body);
     return body;
   }

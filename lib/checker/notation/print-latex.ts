@@ -183,7 +183,8 @@ function runText(begun: string, part: readonly Factor[], offset: number, all: re
   part.forEach(({ join, body }, position) => {
     const before = all[offset + position - 1]?.body;
     const previousOver = position > 0 && part[position - 1]?.join === 'over';
-    const factor = factorText(body, join, text === '');
+    const literal = join === 'over' && body.node === 'number' && isPowerOfTen(part[position + 1]?.body);
+    const factor = literal ? parenthesised(print(body)) : factorText(body, join, text === '');
     if (text === '') text = factor;
     else if (join === 'over') text += `/${factor}`;
     else if (join === 'times' || previousOver || needsSign(before, factor)) text += `\\cdot ${factor}`;
@@ -191,6 +192,11 @@ function runText(begun: string, part: readonly Factor[], offset: number, all: re
     else text += ` ${factor}`;
   });
   return text;
+}
+
+/** A power of ten after a divisor would be read as part of its number. */
+function isPowerOfTen(tree: Expression | undefined): boolean {
+  return tree?.node === 'power' && tree.base.node === 'number' && tree.base.mantissa === '10';
 }
 
 function factorText(body: Expression, join: Factor['join'], isFirst: boolean): string {

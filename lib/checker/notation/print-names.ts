@@ -48,6 +48,10 @@ function indexCharacter(character: string): string {
       return '\\uparrow ';
     case '↓':
       return '\\downarrow ';
+    case 'ħ':
+      return '\\hbar ';
+    case 'ℓ':
+      return '\\ell ';
     default: {
       const greek = greekNames.get(character);
       return greek === undefined ? character : `\\${greek} `;

@@ -214,15 +214,19 @@ function capitalGreek(base: string): string {
   return /^[A-Z]/.test(name) ? `capital ${name.toLowerCase()}` : name;
 }
 
+const indexWords: ReadonlyMap<string, string> = new Map([
+  ['+', 'plus'],
+  ['-', 'minus'],
+  ['±', 'plus or minus'],
+  ['∓', 'minus or plus'],
+  ['↑', 'up'],
+  ['↓', 'down'],
+  ['ħ', 'h-bar'],
+  ['ℓ', 'l'],
+]);
+
 function sayIndex(index: string): string {
-  const words: Readonly<Record<string, string>> = {
-    '+': 'plus',
-    '-': 'minus',
-    '±': 'plus or minus',
-    '↑': 'up',
-    '↓': 'down',
-  };
-  return words[index] ?? greekNames.get(index) ?? index;
+  return indexWords.get(index) ?? greekNames.get(index) ?? index;
 }
 
 function sayState(state: StateLabel, written: string): string {

@@ -74,7 +74,7 @@ function readNumber(writer: TokenWriter): void {
     writer.fail('number-too-large', length, 'This power of ten is too large to be read.');
   } else {
     if (scanned.scientific) writer.lowerExponentUsed ||= source.slice(position, scanned.end).includes('e');
-    const token = writer.add('number', scanned.mantissa, length);
+    const token = writer.add('number', scanned.mantissa.replace(/\.$/, ''), length);
     token.exponent = scanned.exponent;
     token.scientific = scanned.scientific;
   }

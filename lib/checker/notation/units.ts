@@ -6,8 +6,9 @@ export interface UnitEntry {
   readonly takesPrefix: boolean;
 }
 
-const prefixed = 'Hz s m g A K mol cd N Pa J W C V F S Wb T H eV rad L l G Gy Bq lm lx kat bar ohm sr'.split(' ');
-const plain = 'min deg u Da'.split(' ');
+const prefixed = 'Hz s m g A K mol cd N Pa J W C V F S Wb T H eV rad L l G Gy Bq lm lx kat ohm sr'.split(' ');
+// `hbar` is no hectobar.
+const plain = 'min deg u Da bar'.split(' ');
 
 const entries = new Map<string, UnitEntry>();
 for (const unit of prefixed) entries.set(unit, { unit: unit === 'l' ? 'L' : unit, takesPrefix: true });

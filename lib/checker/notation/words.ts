@@ -151,7 +151,7 @@ class Resolver {
       }
       return;
     }
-    this.unknown(token, letters, this.at + 3, 'undeclared-name');
+    this.unknown(token, greekLetter(letters), this.at + 3, 'undeclared-name');
   }
 
   private suffixed(token: Token, index: string, next: number, valid: boolean): void {
