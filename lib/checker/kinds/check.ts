@@ -80,7 +80,9 @@ function decideIn(
   try {
     wanted = answerValue(context.environment, request.kind, referenceTree);
   } catch (error) {
-    return { error: `The reference has no value: ${failureOf(error).message}.` };
+    const failure = failureOf(error);
+    if (failure.type === 'budget') return undecided('', failure.message, null);
+    return { error: `The reference has no value: ${failure.message}.` };
   }
   const refused = refuseReference(request, context, wanted);
   if (refused !== null) return { error: refused };
