@@ -4,12 +4,14 @@
  */
 import { availableParallelism } from 'node:os';
 import { CheckWorkers } from './checks/check-workers.mjs';
+import { compile } from './checks/compile.mjs';
 import { LineSplitter } from './checks/line-splitter.mjs';
 
 const BATCH_LINES = 64;
 const BATCH_BYTES = 256 * 1024;
 
-const workers = new CheckWorkers(availableParallelism());
+const code = await compile(new URL('./checks/check-worker.ts', import.meta.url));
+const workers = new CheckWorkers(availableParallelism(), code);
 
 process.stdout.on('error', (error) => {
   // Whoever reads has seen enough (`| head`).

@@ -13,8 +13,12 @@ export class CheckWorkers {
   #waiting = [];
   #watch;
 
-  constructor(size) {
+  #code;
+
+  /** `code` is the compiled check-worker. */
+  constructor(size, code) {
     this.size = size;
+    this.#code = code;
     this.#watch = setInterval(() => this.#endHung(), WATCH_MS);
     this.#watch.unref();
   }
@@ -46,7 +50,7 @@ export class CheckWorkers {
 
   #start() {
     const shared = new SharedArrayBuffer(4);
-    const worker = new Worker(new URL('./check-thread.mjs', import.meta.url), { workerData: shared });
+    const worker = new Worker(this.#code, { eval: true, workerData: shared });
     const slot = { worker, progress: new Int32Array(shared), task: null, since: 0, seen: -1 };
     this.#all.add(slot);
     worker.on('message', (lines) => {
