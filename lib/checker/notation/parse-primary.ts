@@ -4,6 +4,7 @@ import { choices, type Cursor } from './cursor';
 import { closeBracket, parseBars, parseBracket, parseEnvironment } from './parse-bracket';
 import { parseFunction, parseReference, parseWrapper } from './parse-function';
 import { parseNumber, parseVulgar } from './parse-number';
+import { isSign } from './parse-sign';
 import { type Token } from './token';
 import { type Expression } from './tree';
 import { isLiteralZero, quotientType, scalarFunctionType } from './typing';
@@ -101,7 +102,9 @@ function parseRoot(cursor: Cursor): Expression {
   const expected = cursor.stateExpected;
   cursor.stateExpected = false;
   let radicand: Expression;
-  if (open.kind === '{') {
+  if (isSign(open)) {
+    return cursor.fail('missing-operand', open, 'A sign after a root needs brackets.', 'Write it as in √(-x).');
+  } else if (open.kind === '{') {
     radicand = braced(cursor, open);
   } else if (open.kind === '(' && cursor.takes(choices.shortExtent)) {
     radicand = cursor.grammar.primary(cursor);

@@ -50,6 +50,7 @@ function beforeJoin(tokens: readonly Token[], index: number): number {
 /** quantity = [ left-side ] value [ [ `*` | `/` ] unit ], the value read already up to where the unit starts */
 export function parseQuantity(cursor: Cursor, unitAt: number, end: number): QuantityNode {
   const { from } = passLeftSide(cursor, 0, unitAt);
+  if (from === unitAt && unitAt < end) refuseNoNumber(cursor, unitAt);
   const value = cursor.within(from, unitAt, () => {
     const sum = cursor.grammar.sum(cursor);
     if (!cursor.atEnd()) cursor.fail('unexpected', cursor.peek(), 'This is not expected in the value.');
@@ -66,6 +67,16 @@ export function parseQuantity(cursor: Cursor, unitAt: number, end: number): Quan
   }
   const span = { start: value.span.start, end: cursor.tokens[end - 1]?.end ?? value.span.end };
   return { node: 'quantity', span, value, unit };
+}
+
+function refuseNoNumber(cursor: Cursor, unitAt: number): void {
+  const token = cursor.tokens[unitAt];
+  if (token?.kind === 'letters' && unitsOf(token.text) === null) {
+    const message = `A quantity is a number and a unit, and ${token.text} is neither.`;
+    cursor.fail('symbol-in-quantity', token, message);
+  } else if (token) {
+    cursor.fail('missing-operand', token, 'A number is missing before the unit.', 'Write it as in 63.87 MHz.');
+  }
 }
 
 function checkValue(cursor: Cursor, value: Expression, hasUnit: boolean): void {

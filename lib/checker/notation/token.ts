@@ -76,6 +76,8 @@ export interface Token {
   /** Whether it was set upright (`\mathrm`), so that an e is Euler's. */
   upright: boolean;
   hat: boolean;
+  /** Numbers: whether it is one digit that is a part of a fraction, as in `\frac12`. */
+  part: boolean;
   /** Numbers: the written power of ten. */
   exponent: number;
   /** Numbers: whether a power of ten was written with e. */
@@ -100,6 +102,7 @@ export function makeToken(kind: TokenKind, text: string, start: number, end: num
     command: false,
     upright: false,
     hat: false,
+    part: false,
     exponent: 0,
     scientific: false,
     meaning: null,

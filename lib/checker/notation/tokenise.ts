@@ -63,7 +63,7 @@ function readLetters(writer: TokenWriter): void {
 function readNumber(writer: TokenWriter): void {
   const { source, options, position } = writer;
   if (writer.pending > 0) {
-    writer.add('number', source.charAt(position), 1);
+    writer.add('number', source.charAt(position), 1).part = true;
     return;
   }
   const scanned = scanNumber(source, position, options.lowerExponent, options.upperExponent);

@@ -5,6 +5,7 @@ import { nearestName } from './scope';
 import { knownPrefix } from './split';
 import { type Token } from './token';
 import { type Expression } from './tree';
+import { unitOf } from './units';
 
 /** Reports an unknown name where an expression uses it. */
 export function unknownName(cursor: Cursor, token: Token): Expression {
@@ -58,14 +59,26 @@ function undeclared(cursor: Cursor, token: Token, name: string, span: Span): Exp
       `Did you mean ${near}?`,
     );
   }
-  const { names } = cursor.scope;
-  const hint = names.length === 0 || names.length > 12 ? undefined : `Declared are ${names.join(', ')}.`;
+  const hint = hintFor(cursor, token);
   const known = token.index === null ? knownPrefix(token.text, cursor.scope) : 0;
   const aligned = token.end - token.start === token.text.length;
-  if (known === 0 || !aligned) {
+  if (known * 2 < token.text.length || !aligned || isConnective(token)) {
     return cursor.fail('undeclared-name', span, `The name ${name} is not known in this question.`, hint);
   }
   const rest = { start: token.start + known, end: token.end };
   const message = `In ${name} the part ${token.text.slice(known)} is not known in this question.`;
   return cursor.fail('undeclared-name', rest, message, hint);
+}
+
+function isConnective(token: Token): boolean {
+  return token.text === 'and' || token.text === 'or';
+}
+
+function hintFor(cursor: Cursor, token: Token): string | undefined {
+  if (isConnective(token)) return 'Separate two values by a comma.';
+  if (token.index === null && cursor.previous().kind === 'number' && unitOf(token.text)) {
+    return 'If this is a unit: none is asked for here.';
+  }
+  const { names } = cursor.scope;
+  return names.length === 0 || names.length > 12 ? undefined : `Declared are ${names.join(', ')}.`;
 }

@@ -68,7 +68,7 @@ class Resolver {
       this.indexed(token);
     } else if (next.kind === 'subscript') {
       this.suffixed(token, next.text, this.at + 2, true);
-    } else if (next.kind === 'number' && !next.spaced) {
+    } else if (next.kind === 'number' && !next.spaced && !next.part) {
       this.digits(token, next);
     } else {
       this.suffixed(token, '', this.at + 1, true);
@@ -104,6 +104,10 @@ class Resolver {
       const split = splitRun(token.text, { index: number.text, primes: primes.count }, this.scope);
       if (split) {
         this.pieces(token, split, number.text, primes.next);
+        return;
+      }
+      if (primes.count > 0 && splitRun(token.text, { index: number.text, primes: 0 }, this.scope)) {
+        this.unknown(token, number.text, primes.next, 'prime');
         return;
       }
     }
