@@ -19,20 +19,22 @@ export default async function WorkPage() {
   const now = new Date();
   const rows = await ownSets(actor.userId, now);
   const work = presentOwnSets(rows, now);
-  const notices = new Map(rows.map((row) => [row.courseCode, row.courseNotice]));
+  const notices = new Map(rows.filter((row) => row.courseNotice).map((row) => [row.courseCode, row.courseNotice]));
   const isEmpty = Object.values(work).every((lines) => lines.length === 0);
   return (
     <>
       <SiteHead actor={actor} here="work" place="My work" />
       <ScriptPage>
         <Section
-          margin={[...notices].map(([code, notice]) =>
-            notice ? (
-              <MarginNote key={code}>
-                {code}: {notice}
-              </MarginNote>
-            ) : null,
-          )}
+          margin={
+            notices.size > 0
+              ? [...notices].map(([code, notice]) => (
+                  <MarginNote key={code}>
+                    {code}: {notice}
+                  </MarginNote>
+                ))
+              : null
+          }
         >
           <PageTitle>My work</PageTitle>
           {isEmpty ? (

@@ -71,7 +71,7 @@ export function Spellings({ onTry }: { onTry: (example: Example) => void }) {
           <p className="text-small text-grey">{what}</p>
           <p className="flex flex-wrap gap-x-6 gap-y-1">
             {spellings.map((text) => (
-              <Button key={text} look="plain" onClick={() => onTry({ text, kind, symbols })}>
+              <Button key={text} look="plain" className="text-start" onClick={() => onTry({ text, kind, symbols })}>
                 <code className="break-all">{text}</code>
               </Button>
             ))}
