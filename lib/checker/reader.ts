@@ -3,7 +3,7 @@
  */
 import { type Diagnostic, isFatal } from './diagnostics';
 import { type ReadingContext } from './notation/answer-tree';
-import { parse } from './notation/parse';
+import { answerGrammar, parseText } from './notation/parse-text';
 import { printLatex } from './notation/print-latex';
 import { printPlain } from './notation/print-plain';
 
@@ -21,7 +21,10 @@ export interface Reading {
 
 /** Reads what a student typed. Never throws; takes time linear in the length. */
 export function read(text: string, context: ReadingContext): Reading {
-  const { tree, diagnostics, ambiguous } = parse(text, { ...context, allowReferenceFunctions: false });
+  const { tree, diagnostics, ambiguous } = parseText(answerGrammar, text, {
+    ...context,
+    allowReferenceFunctions: false,
+  });
   if (tree === null || diagnostics.some(isFatal)) {
     return { readable: false, latex: '', plain: '', diagnostics, ambiguous: false };
   }

@@ -3,7 +3,7 @@ import { type Diagnostic, type DiagnosticCode, type Span } from '../diagnostics'
 import { maximumDepth, maximumNodes } from './limits';
 import { type Scope } from './scope';
 import { makeToken, type Token, type TokenKind } from './token';
-import { type Expression, type NumberNode, type ValueType } from './tree';
+import { type Expression, type NumberNode, type ReferenceName, type ValueType } from './tree';
 import { isRefusal, type Typed } from './typing';
 
 /** Places where people write one thing and mean another; each is one bit. */
@@ -25,6 +25,8 @@ export interface Grammar {
   readonly sum: (cursor: Cursor) => Expression;
   readonly power: (cursor: Cursor) => Expression;
   readonly primary: (cursor: Cursor) => Expression;
+  /** Null where reference functions are never read. */
+  readonly reference: ((cursor: Cursor, token: Token, name: ReferenceName) => Expression) | null;
 }
 
 /** A reading remembered when a rule gives a factor back. */

@@ -3,10 +3,10 @@ import { type Cursor } from './cursor';
 import { numberNode } from './parse-number';
 import { superscriptExponent } from './parse-power';
 import { parseRun } from './parse-run';
-import { fitsSlot, nameOfSlot, referenceSignatures, type Slot } from './reference-functions';
+import { parseArguments, refuseCount } from './parse-arguments';
 import { type Token } from './token';
-import { type Expression, type FunctionName, type ReferenceName } from './tree';
-import { listLength, nameOfType, scalarFunctionType } from './typing';
+import { type Expression, type FunctionName } from './tree';
+import { scalarFunctionType } from './typing';
 import { inverseFunctions } from './vocabulary';
 
 /**
@@ -22,7 +22,7 @@ export function parseFunction(cursor: Cursor, token: Token, name: FunctionName):
     const message = `The inverse of ${name} has no name here.`;
     return cursor.fail('no-inverse-function', span, message, `For 1/${name} write 1/${name}(x).`);
   }
-  const values = called === 'atan2' ? parseArguments(cursor, token, 2) : [parseArgument(cursor, false)];
+  const values = called === 'atan2' ? parsePair(cursor, token) : [parseArgument(cursor, false)];
   const span = { start: token.start, end: cursor.previous().end };
   const type = callType(cursor, called, values, span);
   const written = isInverse ? 'inverse' : 'name';
@@ -115,37 +115,9 @@ function isMinusOne(exponent: Expression): boolean {
   return term?.sign === '-' && term.body.node === 'number' && term.body.numerator === term.body.denominator;
 }
 
-/** arguments = `(` sum { `,` sum } `)` */
-function parseArguments(cursor: Cursor, token: Token, count: number, slots: readonly Slot[] = []): Expression[] {
-  const open = cursor.peek();
-  if (!cursor.accept('(')) {
-    cursor.fail('missing-argument', token, `The function ${token.text} needs its arguments in brackets.`);
-    return [];
-  }
-  const expected = cursor.stateExpected;
-  const values: Expression[] = [];
-  do {
-    const slot = slots[values.length];
-    cursor.stateExpected = slot === 'state' || slot === 'density';
-    const value = cursor.grammar.sum(cursor);
-    if (slot && !fitsSlot(slot, value.type, listLength(value))) {
-      cursor.fail('bad-argument', value.span, `Here ${nameOfSlot(slot)} is expected, not ${nameOfType(value.type)}.`);
-    }
-    values.push(value);
-  } while (cursor.accept(','));
-  cursor.stateExpected = expected;
-  if (!cursor.accept(')')) cursor.fail('unclosed', open, 'This bracket is not closed.', 'Add ).');
-  if (values.length !== count) {
-    const span = { start: token.start, end: cursor.previous().end };
-    cursor.fail('argument-count', span, `The function ${token.text} takes ${count} arguments.`);
-  }
+/** pair = `(` sum `,` sum `)` */
+function parsePair(cursor: Cursor, token: Token): readonly Expression[] {
+  const values = parseArguments(cursor, token);
+  if (values.length !== 2) refuseCount(cursor, token, 2);
   return values;
-}
-
-/** reference = name `(` argument { `,` argument } `)` */
-export function parseReference(cursor: Cursor, token: Token, name: ReferenceName): Expression {
-  const { slots, type } = referenceSignatures[name];
-  const values = parseArguments(cursor, token, slots.length, slots);
-  const span = { start: token.start, end: cursor.previous().end };
-  return cursor.node({ node: 'reference', type, span, name, arguments: values });
 }

@@ -2,7 +2,7 @@
 import { type Span } from '../diagnostics';
 import { choices, type Cursor } from './cursor';
 import { closeBracket, parseBars, parseBracket, parseEnvironment } from './parse-bracket';
-import { parseFunction, parseReference, parseWrapper } from './parse-function';
+import { parseFunction, parseWrapper } from './parse-function';
 import { parseNumber, parseVulgar } from './parse-number';
 import { isSign } from './parse-sign';
 import { type Token } from './token';
@@ -73,7 +73,7 @@ function parseWord(cursor: Cursor, token: Token, meaning: Meaning): Expression {
     case 'wrapper':
       return parseWrapper(cursor, token, meaning.name);
     case 'reference':
-      return parseReference(cursor, token, meaning.name);
+      return cursor.grammar.reference?.(cursor, token, meaning.name) ?? missing(cursor, token);
     case 'operator':
       return cursor.node({
         node: 'operator',
