@@ -64,11 +64,12 @@ export function canReach(folder, user) {
 function own(folder, user) {
   mkdirSync(folder, { recursive: true, mode: 0o700 });
   const { uid, mode } = statSync(folder);
-  if (user !== null && uid !== user.uid) chownSync(folder, user.uid, user.gid);
-  else if (user === null && process.getuid && uid !== process.getuid()) {
+  const owner = user?.uid ?? process.getuid?.() ?? uid;
+  if (uid !== owner && clusterVersion(folder) === null && user !== null) chownSync(folder, user.uid, user.gid);
+  else if (uid !== owner) {
     throw new Failure(
-      `${folder} belongs to another user (Halfmark was first started as root?).`,
-      'Start as that user again, or move .halfmark aside to begin anew.',
+      `${folder} belongs to another user (number ${uid}).`,
+      'Start as the user who started first, or move it aside to begin anew.',
     );
   }
   if ((mode & 0o077) !== 0) throw new Failure(`${folder} can be read by others.`, `Run: chmod 700 ${folder}`);
