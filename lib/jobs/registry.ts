@@ -1,7 +1,11 @@
 import { checkAnswers } from './check-answers';
 import { closeDueSets } from './close-due-sets';
+import { commitIntake } from './commit-intake';
+import { expireLeases } from './expire-leases';
 import { type JobHandlers } from './job-handler';
+import { parseIntake } from './parse-intake';
 import { sendAccountMail } from './send-account-mail';
+import { sendScoreReport } from './send-score-report';
 
 /**
  * The handler of every job. A job whose handler is missing here stays in the queue until a worker has one.
@@ -9,7 +13,11 @@ import { sendAccountMail } from './send-account-mail';
 export const jobHandlers: JobHandlers = {
   'check-answers': checkAnswers,
   'close-due-sets': closeDueSets,
+  'commit-intake': commitIntake,
+  'expire-leases': expireLeases,
+  'parse-intake': parseIntake,
   'send-account-mail': sendAccountMail,
+  'send-score-report': sendScoreReport,
 };
 
 /** Jobs that the clock puts into the queue: minute, hour, day of month, month, day of week (UTC). */
