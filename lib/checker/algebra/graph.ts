@@ -1,3 +1,4 @@
+import { QuietError } from './quiet-error';
 import { isNegative, isZero, ONE, rational, type Rational, ZERO } from './rational';
 
 /**
@@ -43,7 +44,7 @@ export interface Variable {
 }
 
 /** Thrown when the work limit of a check is reached; caught at the checker's door. */
-export class BudgetExceeded extends Error {}
+export class BudgetExceeded extends QuietError {}
 
 /** Steps allowed for one check: about 50 ms on the machine the limit was set on. */
 export const DEFAULT_BUDGET = 2_000_000;

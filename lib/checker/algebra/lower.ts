@@ -39,7 +39,7 @@ export interface Lowering {
   reference(name: string, values: readonly Value[]): Value;
 }
 
-/** The value of an expression tree; throws DefinedNowhere, Unsupported, ReferenceError or BudgetExceeded. */
+/** The value of an expression tree; throws DefinedNowhere, Unsupported, ReferenceProblem or BudgetExceeded. */
 export function lower(tree: Expression, l: Lowering): Value {
   const { g } = l;
   switch (tree.node) {

@@ -1,3 +1,4 @@
+import { QuietError } from './quiet-error';
 import { type Graph, type Node, Op } from './graph';
 import {
   addRational,
@@ -38,7 +39,7 @@ export interface Term {
 export type Polynomial = Map<string, Term>;
 
 /** Thrown where an expanded form would be too large; the caller then keeps the expression as it is. */
-export class TooLarge extends Error {}
+export class TooLarge extends QuietError {}
 
 export const MAXIMUM_TERMS = 96;
 

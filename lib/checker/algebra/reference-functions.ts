@@ -17,7 +17,7 @@ import {
   ketValue,
   listValue,
   operatorValue,
-  ReferenceError,
+  ReferenceProblem,
   scalarValue,
   type Value,
 } from './value';
@@ -50,7 +50,7 @@ function densityOf(c: ReferenceContext, state: Value): Operator {
 }
 
 function requireUnit(c: ReferenceContext, norm: Node, message: string): void {
-  if (norm !== c.g.one && !c.equal(norm, c.g.one)) throw new ReferenceError(message);
+  if (norm !== c.g.one && !c.equal(norm, c.g.one)) throw new ReferenceProblem(message);
 }
 
 /** ⟨A⟩ = ⟨ψ|A|ψ⟩ or Tr ρA (Sakurai & Napolitano §1.4, §3.4). */
@@ -88,7 +88,7 @@ function eigenpairs(c: ReferenceContext, matrix: Operator): Eigenpair[] {
     ];
   }
   const { centre, splitting } = operators.centreAndSplitting(g, matrix);
-  if (zero(splitting)) throw new ReferenceError('the operator has only one eigenvector');
+  if (zero(splitting)) throw new ReferenceProblem('the operator has only one eigenvector');
   return [splitting, negate(g, splitting)].map((shift) => {
     const value = add(g, centre, shift);
     const state: Components = zero(m12) ? [subtract(g, value, m22), m21] : [m12, subtract(g, value, m11)];
@@ -118,7 +118,7 @@ function propagator({ g, hbar }: ReferenceContext, h: Operator, t: Node): Operat
 function dotSigma(g: Graph, v: readonly Node[]): Operator {
   const [x, y, z] = v;
   if (x === undefined || y === undefined || z === undefined || v.length !== 3) {
-    throw new ReferenceError('three components are needed');
+    throw new ReferenceProblem('three components are needed');
   }
   return operators.fromPauli(g, [g.zero, x, y, z]);
 }

@@ -1,3 +1,4 @@
+import { QuietError } from './quiet-error';
 import { BudgetExceeded, Flag, type Graph, MAXIMUM_EXPONENT, type Node, Op, POSITIVE } from './graph';
 import {
   addRational,
@@ -21,7 +22,7 @@ import {
  */
 
 /** Thrown where a value is defined nowhere: 1/0, the logarithm of 0, the inverse of a singular operator. */
-export class DefinedNowhere extends Error {}
+export class DefinedNowhere extends QuietError {}
 
 /** The numeric coefficient and the rest of a product; the rest of a number is 1. */
 function coefficientOf(g: Graph, node: Node): Rational {

@@ -1,3 +1,4 @@
+import { QuietError } from './quiet-error';
 import { type Graph, type Node } from './graph';
 import { type Components, identityTimes, type Operator } from './operators';
 
@@ -23,10 +24,10 @@ export const braValue = (components: Components): Value => ({ type: 'bra', compo
 export const listValue = (entries: readonly Node[]): Value => ({ type: 'list', entries });
 
 /** Thrown where an expression asks for something that has no meaning or lies outside what is worked out. */
-export class Unsupported extends Error {}
+export class Unsupported extends QuietError {}
 
 /** Thrown where a reference function's condition does not hold; the message is for the author. */
-export class ReferenceError extends Error {}
+export class ReferenceProblem extends QuietError {}
 
 export function asScalar(value: Value): Node {
   if (value.type !== 'scalar') throw new Unsupported('a scalar was expected');

@@ -1,7 +1,7 @@
 import { assume } from '../algebra/assumptions';
 import { Environment } from '../algebra/environment';
 import { DefinedNowhere } from '../algebra/scalars';
-import { Unsupported, ReferenceError, type Value } from '../algebra/value';
+import { Unsupported, ReferenceProblem, type Value } from '../algebra/value';
 import { BudgetExceeded, DEFAULT_BUDGET } from '../algebra/graph';
 import { type CheckOptions, type SymbolTable } from '../contract';
 import { decideEqual } from '../equivalence/decide';
@@ -87,7 +87,7 @@ export type Failure =
 /** Sorts the errors that building and comparing values may throw; any other is thrown on. */
 export function failureOf(error: unknown): Failure {
   if (error instanceof DefinedNowhere) return { type: 'nowhere', message: error.message };
-  if (error instanceof ReferenceError) return { type: 'reference', message: error.message };
+  if (error instanceof ReferenceProblem) return { type: 'reference', message: error.message };
   if (error instanceof BudgetExceeded) return { type: 'budget', message: 'the work limit of a check was reached' };
   if (error instanceof Unsupported) return { type: 'unsupported', message: error.message };
   if (error instanceof RangeError) return { type: 'budget', message: 'the expression is nested too deeply' };

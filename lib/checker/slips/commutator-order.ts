@@ -1,7 +1,8 @@
 import { adjoint, trace } from '../algebra/operators';
+import { MINUS_ONE } from '../algebra/rational';
 import { add } from '../algebra/scalars';
 import { vanishesAtPoints } from '../kinds/comparison';
-import { type RatioSlip, type TreeSlip } from './slip';
+import { type RatioSlip, realFactor, type TreeSlip } from './slip';
 import { everywhereAndEach } from './tree-changes';
 
 const id = 'commutator-order';
@@ -31,7 +32,7 @@ export const commutatorOrderOfValue: RatioSlip = {
   type: 'ratio',
   id,
   sentence,
-  factors: (g) => [g.integer(-1)],
+  factors: [realFactor(MINUS_ONE)],
   applies: ({ reference, context }) => {
     if (reference.kind !== 'operator' && reference.kind !== 'pauli') return false;
     const { g } = context.environment;

@@ -1,79 +1,49 @@
-import { type Node } from '../algebra/graph';
-import { multiply } from '../algebra/scalars';
 import { factorHalf } from './factor-half';
 import { factorTwo } from './factor-two';
 import { hbarPower } from './hbar-power';
 import { extraI } from './missing-i';
 import { missingTwoPi } from './missing-two-pi';
+import { multiply } from '../algebra/scalars';
 import { sign } from './sign';
-import { type RatioSlip, type Trial } from './slip';
+import { type Factor, type RatioSlip } from './slip';
 
-/** A constant factor between reference and answer, as a node and as its value at the trial's point. */
-export interface Factor {
+/** A factor with the name of the slip, or pair of slips, that it is. */
+export interface NamedFactor extends Factor {
   readonly id: string;
-  readonly node: () => Node;
-  readonly re: number;
-  readonly im: number;
+  readonly slips: readonly RatioSlip[];
 }
 
-/** Factors that also go with a change of the form. */
-const withChanges: readonly RatioSlip[] = [sign, factorHalf, factorTwo, hbarPower];
+const named = (slip: RatioSlip): NamedFactor[] =>
+  slip.factors.map((factor) => ({ ...factor, id: slip.id, slips: [slip] }));
 
-/** Two factors at once; the commonest only. */
-const together: readonly (readonly [RatioSlip, RatioSlip])[] = [
-  [sign, factorHalf],
-  [sign, factorTwo],
-  [sign, hbarPower],
-  [sign, extraI],
-  [sign, missingTwoPi],
-  [factorHalf, hbarPower],
-  [factorTwo, hbarPower],
-  [factorHalf, extraI],
-  [factorTwo, extraI],
-  [factorHalf, missingTwoPi],
-  [factorTwo, missingTwoPi],
-  [hbarPower, extraI],
-  [hbarPower, missingTwoPi],
-];
+/** Factors that also go with another change. */
+export const factorsWithChanges: readonly NamedFactor[] = [sign, factorHalf, factorTwo, hbarPower].flatMap(named);
 
-/** The factors of one slip. */
-export function factorsOf(slip: RatioSlip, { context, point }: Trial): Factor[] {
-  const { g, hbar } = context.environment;
-  return slip.factors(g, hbar).map((node) => {
-    point.evaluate(node);
-    return { id: slip.id, node: () => node, re: point.re[node]!, im: point.im[node]! };
-  });
-}
-
-/** The factors that go with a change of the form. */
-export const factorsWithChanges = (trial: Trial): Factor[] => withChanges.flatMap((slip) => factorsOf(slip, trial));
-
-/** Products of two factors of different slips, neither of which explains the answer alone. */
-export function factorPairs(
-  trial: Trial,
-  alone: readonly string[],
-): (Factor & { readonly slips: readonly RatioSlip[] })[] {
-  const { g } = trial.context.environment;
-  const known = new Map<RatioSlip, Factor[]>();
-  const get = (slip: RatioSlip): Factor[] => {
-    const factors = known.get(slip) ?? factorsOf(slip, trial);
-    known.set(slip, factors);
-    return factors;
-  };
-  const pairs: (Factor & { slips: readonly RatioSlip[] })[] = [];
-  for (const [first, second] of together) {
-    if (alone.includes(first.id) || alone.includes(second.id)) continue;
-    for (const x of get(first)) {
-      for (const y of get(second)) {
-        pairs.push({
-          id: `${first.id}+${second.id}`,
-          slips: [first, second],
-          node: () => multiply(g, x.node(), y.node()),
-          re: x.re * y.re - x.im * y.im,
-          im: x.re * y.im + x.im * y.re,
-        });
-      }
-    }
-  }
-  return pairs;
-}
+/** Products of two factors of different slips; the commonest only, in catalogue order. */
+export const factorPairs: readonly NamedFactor[] = (
+  [
+    [sign, factorHalf],
+    [sign, factorTwo],
+    [sign, hbarPower],
+    [sign, extraI],
+    [sign, missingTwoPi],
+    [factorHalf, hbarPower],
+    [factorTwo, hbarPower],
+    [factorHalf, extraI],
+    [factorTwo, extraI],
+    [factorHalf, missingTwoPi],
+    [factorTwo, missingTwoPi],
+    [hbarPower, extraI],
+    [hbarPower, missingTwoPi],
+  ] as const
+).flatMap(([first, second]) =>
+  first.factors.flatMap((x) =>
+    second.factors.map((y): NamedFactor => ({
+      id: `${first.id}+${second.id}`,
+      slips: [first, second],
+      re: (hbar) => x.re(hbar) * y.re(hbar) - x.im(hbar) * y.im(hbar),
+      im: (hbar) => x.re(hbar) * y.im(hbar) + x.im(hbar) * y.re(hbar),
+      node: (g, hbar) => multiply(g, x.node(g, hbar), y.node(g, hbar)),
+    })),
+  ),
+);

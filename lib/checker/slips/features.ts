@@ -1,5 +1,5 @@
 import { type AnswerTree } from '../notation/answer-tree';
-import { type Expression } from '../notation/tree';
+import { type Expression, type ReferenceNode } from '../notation/tree';
 
 /** What of an author's tree the slips of trees look for, found in one pass that builds nothing. */
 export interface Features {
@@ -59,8 +59,8 @@ function scan(tree: Expression, features: Features): void {
       return;
     case 'reference':
       if (tree.name === 'commutator') features.commutator = true;
+      scanArguments(tree, features);
       if (tree.name === 'uncertainty') features.root = true;
-      for (const argument of tree.arguments) scan(argument, features);
       return;
     case 'call':
       for (const argument of tree.arguments) scan(argument, features);
@@ -97,4 +97,12 @@ function scan(tree: Expression, features: Features): void {
     case 'bra':
       return;
   }
+}
+
+/** In the arguments of a reference function only operators count: its i and roots are the author's, not the student's. */
+function scanArguments(tree: ReferenceNode, features: Features): void {
+  const { i, root } = features;
+  for (const argument of tree.arguments) scan(argument, features);
+  features.i = i;
+  features.root = root;
 }

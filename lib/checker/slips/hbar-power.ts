@@ -6,5 +6,5 @@ export const hbarPower: RatioSlip = {
   type: 'ratio',
   id: 'hbar-power',
   sentence: 'a power of ħ is missing or too many',
-  factors: (g, hbar) => [-1, 1, -2, 2].map((n) => power(g, hbar, n)),
+  factors: [-1, 1, -2, 2].map((n) => ({ re: (hbar) => hbar ** n, im: () => 0, node: (g, hbar) => power(g, hbar, n) })),
 };

@@ -7,9 +7,10 @@ export const missingTwoPi: RatioSlip = {
   type: 'ratio',
   id: 'missing-two-pi',
   sentence: 'a factor 2π between frequency and angular frequency is missing or too many',
-  factors: (g) => {
-    const turn = scale(g, rational(2), pi(g));
-    return [power(g, turn, -1), turn];
-  },
+  factors: [-1, 1].map((n) => ({
+    re: () => (2 * Math.PI) ** n,
+    im: () => 0,
+    node: (g) => power(g, scale(g, rational(2), pi(g)), n),
+  })),
   applies: ({ reference }) => reference.kind !== 'state',
 };

@@ -20,32 +20,28 @@ const changesOfTree: readonly TreeSlip[] = [pauliForSpin, spinForPauli];
 export function pairsOfSlips(search: SlipSearch, alone: readonly string[]): string[] {
   const { trial } = search;
   const found = new Set<string>();
-  for (const pair of factorPairs(trial, alone)) {
-    if (found.has(pair.id) || pair.slips.some((slip) => slip.applies?.(trial) === false)) continue;
-    if (quietly(() => search.isFactor(trial.reference, search.ratios, pair))) found.add(pair.id);
+  for (const pair of factorPairs) {
+    if (!search.ratios.mayBe(pair) || found.has(pair.id)) continue;
+    if (pair.slips.some((slip) => alone.includes(slip.id) || slip.applies?.(trial) === false)) continue;
+    if (quietly(() => search.isFactor(trial.reference, pair))) found.add(pair.id);
   }
-  const isOpen = ({ id }: { readonly id: string }): boolean => !alone.includes(id);
-  const factors = factorsWithChanges(trial).filter(isOpen);
   const tryChanged = (id: string, ratios: Ratios, changed: () => AnswerValue): void => {
-    for (const factor of factors) {
+    for (const factor of ratios.isConstant ? factorsWithChanges : []) {
       const name = `${factor.id}+${id}`;
-      if (!found.has(name) && ratios.mayBe(factor) && quietly(() => search.isFactor(changed(), ratios, factor))) {
-        found.add(name);
-      }
+      if (!ratios.mayBe(factor) || alone.includes(factor.id) || found.has(name)) continue;
+      if (quietly(() => search.isFactor(changed(), factor))) found.add(name);
     }
   };
   for (const [id, value] of changesOfValue(trial)) {
-    if (isOpen({ id })) tryChanged(id, search.ratiosOf(value), () => value);
+    if (!alone.includes(id)) tryChanged(id, search.ratiosOf(value), () => value);
   }
-  for (const slip of changesOfForm.filter(isOpen)) {
-    for (const form of search.changedForms(slip.change)) tryChanged(slip.id, form.ratios, () => search.build(form));
+  for (const { id, change } of changesOfForm) {
+    if (alone.includes(id)) continue;
+    for (const form of search.changedForms(change)) tryChanged(id, form.ratios, () => search.build(form));
   }
-  for (const slip of changesOfTree.filter(isOpen)) {
-    if (!search.holds(slip.needs)) continue;
-    for (const tree of slip.change(trial.referenceTree)) {
-      const value = search.treeValue(tree);
-      tryChanged(slip.id, search.ratiosOf(value), () => value);
-    }
+  for (const slip of changesOfTree) {
+    if (alone.includes(slip.id)) continue;
+    for (const { value, ratios } of search.changedTrees(slip)) tryChanged(slip.id, ratios, () => value);
   }
   return [...found];
 }

@@ -1,25 +1,25 @@
 import { looksEqual, ratioOf, scaledBy, type Values } from './numeric-match';
-import { type Trial } from './slip';
+import { type Factor, type Trial } from './slip';
 
 interface Number2 {
   readonly re: number;
   readonly im: number;
 }
 
-const ONE_RATIO: Number2 = { re: 1, im: 0 };
-
 /** The factors by which an answer may differ from some values of a reference, judged at the trial's point. */
 export class Ratios {
   private readonly ratios: readonly Number2[];
-  /** Nothing can be said: a tolerance or the rule of eigenpairs is in play. */
+  /** Nothing can be said: a tolerance is in play. */
   private readonly open: boolean;
   private readonly upToPhase: boolean;
+  private readonly hbar: number;
 
-  constructor({ reference, context }: Trial, values: Values, answer: Values) {
+  constructor({ reference, context, point }: Trial, values: Values, answer: Values) {
     const { kind } = reference;
     const { options } = context;
-    this.open = kind === 'eigenpairs' || options.tolerance !== undefined;
-    this.upToPhase = options.upToPhase === true && kind !== 'scalar' && kind !== 'vector';
+    this.hbar = point.re[context.environment.hbar]!;
+    this.open = options.tolerance !== undefined;
+    this.upToPhase = options.upToPhase === true && kind !== 'scalar' && kind !== 'vector' && kind !== 'eigenpairs';
     const candidates: Number2[] = [];
     const direct = ratioOf(values, answer);
     if (direct && !this.open) candidates.push(direct);
@@ -36,17 +36,23 @@ export class Ratios {
   }
 
   mayBeOne(): boolean {
-    return this.mayBe(ONE_RATIO);
+    return this.isNear(1, 0);
   }
 
-  mayBe({ re, im }: Number2): boolean {
+  mayBe(factor: Factor): boolean {
+    if (this.open) return true;
+    return this.ratios.length > 0 && this.isNear(factor.re(this.hbar), factor.im(this.hbar));
+  }
+
+  private isNear(re: number, im: number): boolean {
     if (this.open) return true;
     const size = Math.hypot(re, im);
-    return this.ratios.some((ratio) => {
+    for (const ratio of this.ratios) {
       const distance = this.upToPhase
         ? size - Math.hypot(ratio.re, ratio.im)
         : Math.hypot(re - ratio.re, im - ratio.im);
-      return Math.abs(distance) <= 1e-8 * size;
-    });
+      if (Math.abs(distance) <= 1e-8 * size) return true;
+    }
+    return false;
   }
 }

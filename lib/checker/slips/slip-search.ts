@@ -5,13 +5,12 @@ import { multiply } from '../algebra/scalars';
 import { type AnswerValue, answerValue } from '../kinds/answer-value';
 import { nodesOf } from '../kinds/compare';
 import { failureOf } from '../kinds/prepare';
-import { type Factor, factorsOf } from './factors';
 import { featuresOf, type Features } from './features';
 import { type FormChange, type Place, rebuild } from './form-change';
 import { FormEvaluation } from './form-evaluation';
-import { looksEqual, type Values, valuesOf } from './numeric-match';
+import { comparable, looksEqual, type NodeValues, type Values, valuesOf } from './numeric-match';
 import { Ratios } from './ratios';
-import { mapAllNodes, mapNodes, type Slip, type Trial } from './slip';
+import { type Factor, mapAllNodes, mapNodes, type Slip, type Trial, type TreeSlip } from './slip';
 
 /** A change of form at one place, and the factors by which its value differs from the answer at the trial's point. */
 export interface ChangedForm {
@@ -27,6 +26,7 @@ export class SlipSearch {
   readonly ratios: Ratios;
   private features: Features | null = null;
   private forms: FormEvaluation[] | null = null;
+  private readonly trees = new Map<TreeSlip, readonly { value: AnswerValue; ratios: Ratios }[]>();
   private readonly changed = new Map<FormChange, readonly ChangedForm[]>();
 
   constructor(readonly trial: Trial) {
@@ -34,24 +34,24 @@ export class SlipSearch {
     const wanted = nodesOf(reference);
     const given = nodesOf(answer);
     point.evaluate(Math.max(...wanted, ...given));
-    this.answer = valuesOf(point, given);
-    this.ratios = new Ratios(trial, valuesOf(point, wanted), this.answer);
+    const { kind } = reference;
+    this.answer = comparable(kind, valuesOf(point, given));
+    this.ratios = new Ratios(trial, comparable(kind, valuesOf(point, wanted)), this.answer);
   }
 
   fits(slip: Slip): boolean {
     const { trial } = this;
     switch (slip.type) {
       case 'ratio':
-        return (
-          factorsOf(slip, trial).some((factor) => this.isFactor(trial.reference, this.ratios, factor)) &&
-          slip.applies?.(trial) !== false
-        );
+        return this.ratioFits(slip.factors) && slip.applies?.(trial) !== false;
       case 'value':
         return slip.change(trial.reference, trial).some((changed) => this.agrees(changed));
       case 'test':
         return slip.fits(trial);
       case 'tree':
-        return this.holds(slip.needs) && slip.change(trial.referenceTree).some((tree) => this.treeAgrees(tree));
+        return this.changedTrees(slip).some(
+          ({ value, ratios }) => ratios.mayBeOne() && trial.compare(value, trial.answer),
+        );
       case 'form':
         return this.changedForms(slip.change).some(
           (form) => form.ratios.mayBeOne() && trial.compare(this.build(form), trial.answer),
@@ -59,17 +59,10 @@ export class SlipSearch {
     }
   }
 
-  /** Whether the author's tree holds what a slip of trees changes. */
-  holds(feature: keyof Features): boolean {
-    this.features ??= featuresOf(this.trial.referenceTree);
-    return this.features[feature];
-  }
-
   /** Whether the answer is a factor times a value: seen at the point, then proved. */
-  isFactor(value: AnswerValue, ratios: Ratios, factor: Factor): boolean {
-    if (!ratios.mayBe(factor)) return false;
-    const { g } = this.trial.context.environment;
-    const node = factor.node();
+  isFactor(value: AnswerValue, factor: Factor): boolean {
+    const { g, hbar } = this.trial.context.environment;
+    const node = factor.node(g, hbar);
     const scaled = mapNodes(value, (x) => multiply(g, node, x));
     return this.trial.compare(scaled, this.trial.answer);
   }
@@ -78,12 +71,25 @@ export class SlipSearch {
     const { point } = this.trial;
     const nodes = nodesOf(value);
     point.evaluate(Math.max(...nodes));
-    return new Ratios(this.trial, valuesOf(point, nodes), this.answer);
+    return new Ratios(this.trial, this.seen(point, nodes), this.answer);
   }
 
-  /** The value of a changed tree. */
-  treeValue(tree: Trial['referenceTree']): AnswerValue {
-    return answerValue(this.trial.context.environment, this.trial.request.kind, tree);
+  /** The author's tree with a slip's change made, where it has a value. */
+  changedTrees(slip: TreeSlip): readonly { readonly value: AnswerValue; readonly ratios: Ratios }[] {
+    const known = this.trees.get(slip);
+    if (known) return known;
+    const { context, request, referenceTree } = this.trial;
+    this.features ??= featuresOf(referenceTree);
+    const found: { value: AnswerValue; ratios: Ratios }[] = [];
+    for (const tree of this.features[slip.needs] ? slip.change(referenceTree) : []) {
+      quietly(() => {
+        const value = answerValue(context.environment, request.kind, tree);
+        const ratios = this.ratiosOf(value);
+        return ratios.isConstant && found.push({ value, ratios }) > 0;
+      });
+    }
+    this.trees.set(slip, found);
+    return found;
   }
 
   /** Every place of a change on the author's form and on the normal form where it moves the value. */
@@ -94,7 +100,7 @@ export class SlipSearch {
     for (const shape of this.shapes()) {
       for (const place of shape.places(change)) {
         shape.evaluate(change, place);
-        const ratios = new Ratios(this.trial, valuesOf(shape, shape.roots), this.answer);
+        const ratios = new Ratios(this.trial, this.seen(shape, shape.roots), this.answer);
         if (ratios.isConstant) found.push({ shape, change, place, ratios });
       }
     }
@@ -113,15 +119,24 @@ export class SlipSearch {
     return mapAllNodes(this.trial.reference, next);
   }
 
-  private treeAgrees(tree: Trial['referenceTree']): boolean {
-    return quietly(() => this.agrees(this.treeValue(tree)));
+  private seen(at: NodeValues, nodes: readonly Node[]): Values {
+    return comparable(this.trial.reference.kind, valuesOf(at, nodes));
+  }
+
+  private ratioFits(factors: readonly Factor[]): boolean {
+    for (const factor of factors) {
+      if (this.ratios.mayBe(factor) && this.isFactor(this.trial.reference, factor)) return true;
+    }
+    return false;
   }
 
   private agrees(changed: AnswerValue): boolean {
     const { point, answer, compare, reference, context } = this.trial;
     const nodes = nodesOf(changed);
     point.evaluate(Math.max(...nodes));
-    return looksEqual(reference.kind, context.options, valuesOf(point, nodes), this.answer) && compare(changed, answer);
+    return (
+      looksEqual(reference.kind, context.options, this.seen(point, nodes), this.answer) && compare(changed, answer)
+    );
   }
 
   private shapes(): FormEvaluation[] {

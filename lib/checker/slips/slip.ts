@@ -1,4 +1,5 @@
 import { type Graph, type Node } from '../algebra/graph';
+import { type Rational, toNumber } from '../algebra/rational';
 import { type CheckRequest } from '../contract';
 import { type NumericPoint } from '../equivalence/numeric';
 import { type AnswerValue } from '../kinds/answer-value';
@@ -27,10 +28,23 @@ interface Named {
   readonly sentence: string;
 }
 
+/** A constant factor between reference and answer: its value where ħ has a given one, and its node. */
+export interface Factor {
+  readonly re: (hbar: number) => number;
+  readonly im: (hbar: number) => number;
+  readonly node: (g: Graph, hbar: Node) => Node;
+}
+
+/** A real rational factor. */
+export const realFactor = (value: Rational): Factor => {
+  const re = toNumber(value);
+  return { re: () => re, im: () => 0, node: (g) => g.number(value) };
+};
+
 /** The answer is a constant times the reference. */
 export interface RatioSlip extends Named {
   readonly type: 'ratio';
-  readonly factors: (g: Graph, hbar: Node) => readonly Node[];
+  readonly factors: readonly Factor[];
   /** Whether the slip makes sense for this reference; always where absent. */
   readonly applies?: (trial: Trial) => boolean;
 }

@@ -1,5 +1,5 @@
 import { type TreeSlip } from './slip';
-import { everywhereAndEach } from './tree-changes';
+import { everywhere } from './tree-changes';
 
 /** σ stands where S should. */
 export const pauliForSpin: TreeSlip = {
@@ -8,7 +8,7 @@ export const pauliForSpin: TreeSlip = {
   id: 'pauli-for-spin',
   sentence: 'a Pauli matrix stands where a spin operator should',
   change: (tree) =>
-    everywhereAndEach(tree, (node) =>
+    everywhere(tree, (node) =>
       node.node === 'operator' && node.family === 'spin' ? { ...node, family: 'pauli' } : node,
     ),
 };
@@ -20,7 +20,7 @@ export const spinForPauli: TreeSlip = {
   id: 'spin-for-pauli',
   sentence: 'a spin operator stands where a Pauli matrix should',
   change: (tree) =>
-    everywhereAndEach(tree, (node) =>
+    everywhere(tree, (node) =>
       node.node === 'operator' && node.family === 'pauli' ? { ...node, family: 'spin' } : node,
     ),
 };

@@ -26,20 +26,34 @@ export function rewriteAll(tree: AnswerTree, rewrite: Rewrite): AnswerTree {
   }
 }
 
+/** Where a change applies at more places than this, it is tried everywhere at once only. */
+const MOST_PLACES = 3;
+
+/** The tree with the change made everywhere; none where it applies nowhere. */
+export function everywhere(tree: AnswerTree, rewrite: Rewrite): AnswerTree[] {
+  let changed = false;
+  const result = rewriteAll(tree, (node) => {
+    const other = rewrite(node);
+    changed ||= other !== node;
+    return other;
+  });
+  return changed ? [result] : [];
+}
+
 /**
- * The trees with the change made everywhere, then with it made at each single place (at most eight) where it applies.
+ * The trees with the change made everywhere, then with it made at each single place where it applies, if they are few.
  * Empty where it applies nowhere.
  */
 export function everywhereAndEach(tree: AnswerTree, rewrite: Rewrite): AnswerTree[] {
   let count = 0;
-  const everywhere = rewriteAll(tree, (node) => {
+  const all = rewriteAll(tree, (node) => {
     const changed = rewrite(node);
     if (changed !== node) count++;
     return changed;
   });
   if (count === 0) return [];
-  const results = [everywhere];
-  for (let place = 0; count > 1 && place < Math.min(count, 8); place++) {
+  const results = [all];
+  for (let place = 0; count > 1 && count <= MOST_PLACES && place < count; place++) {
     let at = -1;
     results.push(
       rewriteAll(tree, (node) => {
