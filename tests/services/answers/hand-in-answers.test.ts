@@ -91,7 +91,9 @@ describe('handing in', () => {
     await freshRoom();
     const results = await Promise.all([handIn({ a: 'i hbar S_z' }), handIn({ a: 'i hbar S_z' })]);
     expect(await Answer.count({ where: { drawId: draw.id } })).toBe(1);
-    expect(results.map((result) => (result.kind === 'handed-in' ? result.parts[0]?.attemptsLeft : null))).toEqual([2, 2]);
+    expect(results.map((result) => (result.kind === 'handed-in' ? result.parts[0]?.attemptsLeft : null))).toEqual([
+      2, 2,
+    ]);
   });
 
   it('gives two different texts at once two attempts, of which one stands', async () => {
@@ -232,7 +234,11 @@ describe('who and when', () => {
       closesAt: new Date(Date.now() - day / 2),
     });
     await expect(handIn({ a: 'S_x' })).rejects.toMatchObject({ code: 'wrong-state' });
-    const extension = { problemSetId: problemSet.id, closesAt: new Date(Date.now() + day), grantedBy: instructor.user.id };
+    const extension = {
+      problemSetId: problemSet.id,
+      closesAt: new Date(Date.now() + day),
+      grantedBy: instructor.user.id,
+    };
     await Extension.create({ ...extension, userId: student.id });
     await handIn({ a: 'S_x' });
     student = students[1]!.user;
