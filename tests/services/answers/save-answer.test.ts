@@ -30,7 +30,11 @@ describe('keeping what is typed', () => {
 
   it('overwrites nothing that another tab has saved meanwhile, and gives it back', async () => {
     await save('from the first tab', 0);
-    expect(await save('from the second', 0)).toMatchObject({ kind: 'changed', text: 'from the first tab', revision: 1 });
+    expect(await save('from the second', 0)).toMatchObject({
+      kind: 'changed',
+      text: 'from the first tab',
+      revision: 1,
+    });
     expect((await SavedAnswer.findOne({ where: { drawId: room.draws[0]!.id } }))?.text).toBe('from the first tab');
   });
 
