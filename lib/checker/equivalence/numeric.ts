@@ -97,7 +97,7 @@ export class NumericPoint {
       case Op.Ln: {
         const x = this.re[a]!;
         const y = this.im[a]!;
-        const size = Math.hypot(x, y);
+        const size = Math.sqrt(x * x + y * y);
         const error = this.error[a]!;
         const trusted = error < size / 4 && (y === 0 || x > 0 || Math.abs(y) > error || g.has(a, Flag.Real));
         const re = Math.log(size);
@@ -197,7 +197,7 @@ export class NumericPoint {
   private root(node: Node, a: Node, q: number): void {
     const x = this.re[a]!;
     const y = this.im[a]!;
-    const size = Math.hypot(x, y);
+    const size = Math.sqrt(x * x + y * y);
     const error = this.error[a]!;
     if (size <= 4 * error) {
       // Near zero the root's error is that of the radicand to the power 1/q.

@@ -41,8 +41,10 @@ export const factorPairs: readonly NamedFactor[] = (
     second.factors.map((y): NamedFactor => ({
       id: `${first.id}+${second.id}`,
       slips: [first, second],
-      re: (hbar) => x.re(hbar) * y.re(hbar) - x.im(hbar) * y.im(hbar),
-      im: (hbar) => x.re(hbar) * y.im(hbar) + x.im(hbar) * y.re(hbar),
+      value: (hbar) => {
+        const [u, v] = [x.value(hbar), y.value(hbar)];
+        return { re: u.re * v.re - u.im * v.im, im: u.re * v.im + u.im * v.re };
+      },
       node: (g, hbar) => multiply(g, x.node(g, hbar), y.node(g, hbar)),
     })),
   ),

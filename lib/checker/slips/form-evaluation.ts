@@ -105,7 +105,7 @@ export class FormEvaluation {
           break;
         }
         case Op.Ln:
-          re[node] = Math.log(Math.hypot(x, y));
+          re[node] = Math.log(Math.sqrt(x * x + y * y));
           im[node] = Math.atan2(y, x);
           break;
         case Op.Abs:
@@ -128,7 +128,7 @@ export class FormEvaluation {
       this.im[node] = 0;
       return;
     }
-    const size = Math.hypot(x, y) ** n;
+    const size = Math.sqrt(x * x + y * y) ** n;
     const angle = Math.atan2(y, x) * n;
     this.re[node] = size * Math.cos(angle);
     this.im[node] = size * Math.sin(angle);

@@ -6,5 +6,8 @@ export const hbarPower: RatioSlip = {
   type: 'ratio',
   id: 'hbar-power',
   sentence: 'a power of ħ is missing or too many',
-  factors: [-1, 1, -2, 2].map((n) => ({ re: (hbar) => hbar ** n, im: () => 0, node: (g, hbar) => power(g, hbar, n) })),
+  factors: [-1, 1, -2, 2].map((n) => ({
+    value: (hbar) => ({ re: hbar ** n, im: 0 }),
+    node: (g, hbar) => power(g, hbar, n),
+  })),
 };

@@ -23,6 +23,6 @@ export const extraI: RatioSlip = {
   type: 'ratio',
   id,
   sentence,
-  factors: [{ re: () => 0, im: () => 1, node: (g) => g.i }],
+  factors: [{ value: () => ({ re: 0, im: 1 }), node: (g) => g.i }],
   applies: ({ referenceTree }: Trial) => !featuresOf(referenceTree).i,
 };

@@ -8,8 +8,7 @@ export const missingTwoPi: RatioSlip = {
   id: 'missing-two-pi',
   sentence: 'a factor 2π between frequency and angular frequency is missing or too many',
   factors: [-1, 1].map((n) => ({
-    re: () => (2 * Math.PI) ** n,
-    im: () => 0,
+    value: () => ({ re: (2 * Math.PI) ** n, im: 0 }),
     node: (g) => power(g, scale(g, rational(2), pi(g)), n),
   })),
   applies: ({ reference }) => reference.kind !== 'state',

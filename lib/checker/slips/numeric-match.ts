@@ -54,27 +54,7 @@ export function looksEqual(kind: AnswerValue['kind'], options: CheckOptions, x: 
   return true;
 }
 
-/** Ratio y/x at the largest element of x. */
-export function ratioOf(x: Values, y: Values): { readonly re: number; readonly im: number } | null {
-  let pivot = 0;
-  for (let k = 1; k < x.re.length; k++) if (size(x, k) > size(x, pivot)) pivot = k;
-  const square = size(x, pivot) ** 2;
-  if (!(square > 0) || x.re.length !== y.re.length) return null;
-  return {
-    re: (y.re[pivot]! * x.re[pivot]! + y.im[pivot]! * x.im[pivot]!) / square,
-    im: (y.im[pivot]! * x.re[pivot]! - y.re[pivot]! * x.im[pivot]!) / square,
-  };
-}
-
-/** f·x for one complex factor. */
-export function scaledBy(x: Values, f: { readonly re: number; readonly im: number }): Values {
-  return {
-    re: x.re.map((re, k) => re * f.re - x.im[k]! * f.im),
-    im: x.re.map((re, k) => re * f.im + x.im[k]! * f.re),
-  };
-}
-
-const size = (x: Values, k: number): number => Math.hypot(x.re[k]!, x.im[k]!);
+const size = (x: Values, k: number): number => Math.sqrt(x.re[k]! * x.re[k]! + x.im[k]! * x.im[k]!);
 
 function largest(x: Values): number {
   let most = 0;
@@ -87,12 +67,25 @@ function near(x: Values, j: number, y: Values, k: number): boolean {
   return distance <= CLOSE * (largest(x) + largest(y));
 }
 
+/** Two vectors are multiples of each other where x_j y_k = x_k y_j. */
 function sameRay(x: Values, y: Values, sameNorm: boolean): boolean {
-  const ratio = ratioOf(x, y);
-  if (!ratio) return false;
-  if (sameNorm && !(Math.abs(Math.hypot(ratio.re, ratio.im) - 1) <= CLOSE)) return false;
-  return looksEqual('vector', {}, scaledBy(x, ratio), y);
+  let pivot = 0;
+  let norms = 0;
+  for (let k = 0; k < x.re.length; k++) {
+    if (size(x, k) > size(x, pivot)) pivot = k;
+    norms += size(x, k) ** 2 - size(y, k) ** 2;
+  }
+  const scale = largest(x) * largest(y);
+  if (sameNorm && !(Math.abs(norms) <= CLOSE * (largest(x) + largest(y)) ** 2)) return false;
+  const [a, b] = [at(x, pivot), at(y, pivot)];
+  for (let k = 0; k < x.re.length; k++) {
+    const cross = minus(times(at(x, k), b), times(at(y, k), a));
+    if (!(Math.abs(cross[0]) + Math.abs(cross[1]) <= CLOSE * scale)) return false;
+  }
+  return true;
 }
+
+const at = (x: Values, k: number): Complex => [x.re[k]!, x.im[k]!];
 
 type Complex = readonly [number, number];
 const times = (x: Complex, y: Complex): Complex => [x[0] * y[0] - x[1] * y[1], x[0] * y[1] + x[1] * y[0]];
@@ -105,9 +98,9 @@ function over(x: Complex, y: Complex): Complex {
 }
 
 /** VΛV⁻¹ from (λ, v₁, v₂, μ, w₁, w₂). */
-function operatorOfPairs({ re, im }: Values): Values {
-  const at = (k: number): Complex => [re[k]!, im[k]!];
-  const [l, v1, v2, m, w1, w2] = [at(0), at(1), at(2), at(3), at(4), at(5)];
+function operatorOfPairs(values: Values): Values {
+  const [l, v1, v2] = [at(values, 0), at(values, 1), at(values, 2)];
+  const [m, w1, w2] = [at(values, 3), at(values, 4), at(values, 5)];
   const d = minus(times(v1, w2), times(v2, w1));
   const entry = (a: Complex, b: Complex, p: Complex, q: Complex): Complex =>
     over(minus(times(l, times(a, b)), times(m, times(p, q))), d);

@@ -20,15 +20,15 @@ const changesOfTree: readonly TreeSlip[] = [pauliForSpin, spinForPauli];
 export function pairsOfSlips(search: SlipSearch, alone: readonly string[]): string[] {
   const { trial } = search;
   const found = new Set<string>();
-  for (const pair of factorPairs) {
-    if (!search.ratios.mayBe(pair) || found.has(pair.id)) continue;
+  for (const pair of search.ratios.isConstant ? factorPairs : []) {
+    if (!search.ratios.mayBe(pair.value(search.hbar)) || found.has(pair.id)) continue;
     if (pair.slips.some((slip) => alone.includes(slip.id) || slip.applies?.(trial) === false)) continue;
     if (quietly(() => search.isFactor(trial.reference, pair))) found.add(pair.id);
   }
   const tryChanged = (id: string, ratios: Ratios, changed: () => AnswerValue): void => {
     for (const factor of ratios.isConstant ? factorsWithChanges : []) {
       const name = `${factor.id}+${id}`;
-      if (!ratios.mayBe(factor) || alone.includes(factor.id) || found.has(name)) continue;
+      if (!ratios.mayBe(factor.value(search.hbar)) || alone.includes(factor.id) || found.has(name)) continue;
       if (quietly(() => search.isFactor(changed(), factor))) found.add(name);
     }
   };

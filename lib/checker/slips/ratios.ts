@@ -1,33 +1,27 @@
-import { looksEqual, ratioOf, scaledBy, type Values } from './numeric-match';
-import { type Factor, type Trial } from './slip';
+import { type CheckOptions } from '../contract';
+import { type AnswerValue } from '../kinds/answer-value';
+import { type Values } from './numeric-match';
+import { type Complex } from './slip';
 
-interface Number2 {
-  readonly re: number;
-  readonly im: number;
-}
+/** Relative distance within which two doubles look equal. */
+const CLOSE = 1e-9;
 
-/** The factors by which an answer may differ from some values of a reference, judged at the trial's point. */
+/** The factors by which an answer may differ from some values of a reference, judged at one point. */
 export class Ratios {
-  private readonly ratios: readonly Number2[];
+  private readonly ratios: Complex[] = [];
   /** Nothing can be said: a tolerance is in play. */
   private readonly open: boolean;
   private readonly upToPhase: boolean;
-  private readonly hbar: number;
 
-  constructor({ reference, context, point }: Trial, values: Values, answer: Values) {
-    const { kind } = reference;
-    const { options } = context;
-    this.hbar = point.re[context.environment.hbar]!;
+  constructor(kind: AnswerValue['kind'], options: CheckOptions, values: Values, answer: Values) {
     this.open = options.tolerance !== undefined;
-    this.upToPhase = options.upToPhase === true && kind !== 'scalar' && kind !== 'vector' && kind !== 'eigenpairs';
-    const candidates: Number2[] = [];
-    const direct = ratioOf(values, answer);
-    if (direct && !this.open) candidates.push(direct);
-    if (kind === 'eigenvalues' && direct && answer.re.length === 2) {
-      const swapped = ratioOf(values, { re: [answer.re[1]!, answer.re[0]!], im: [answer.im[1]!, answer.im[0]!] });
-      if (swapped) candidates.push(swapped);
-    }
-    this.ratios = candidates.filter((ratio) => looksEqual(kind, options, scaledBy(values, ratio), answer));
+    const ofRay = kind === 'operator' || kind === 'pauli' || kind === 'state';
+    this.upToPhase = options.upToPhase === true && ofRay;
+    if (this.open || values.re.length !== answer.re.length) return;
+    // Up to a scale every multiple agrees already: as a factor it says nothing.
+    const upToScale = options.upToScale === true && kind === 'state';
+    this.add(values, answer, false, upToScale);
+    if (kind === 'eigenvalues') this.add(values, answer, true, false);
   }
 
   /** Whether the answer looks like a constant times the values. */
@@ -35,24 +29,41 @@ export class Ratios {
     return this.open || this.ratios.length > 0;
   }
 
-  mayBeOne(): boolean {
-    return this.isNear(1, 0);
-  }
-
-  mayBe(factor: Factor): boolean {
+  mayBe({ re, im }: Complex): boolean {
     if (this.open) return true;
-    return this.ratios.length > 0 && this.isNear(factor.re(this.hbar), factor.im(this.hbar));
-  }
-
-  private isNear(re: number, im: number): boolean {
-    if (this.open) return true;
-    const size = Math.hypot(re, im);
     for (const ratio of this.ratios) {
+      const size = Math.sqrt(re * re + im * im);
       const distance = this.upToPhase
-        ? size - Math.hypot(ratio.re, ratio.im)
-        : Math.hypot(re - ratio.re, im - ratio.im);
-      if (Math.abs(distance) <= 1e-8 * size) return true;
+        ? Math.abs(size - Math.sqrt(ratio.re * ratio.re + ratio.im * ratio.im))
+        : Math.abs(re - ratio.re) + Math.abs(im - ratio.im);
+      if (distance <= 10 * CLOSE * size) return true;
     }
     return false;
+  }
+
+  /** Adds the ratio at the largest value, if it serves for all (`swapped`: the answer's two values exchanged). */
+  private add(x: Values, y: Values, swapped: boolean, upToScale: boolean): void {
+    const n = x.re.length;
+    let pivot = 0;
+    let largest = 0;
+    for (let k = 0; k < n; k++) {
+      const square = x.re[k]! * x.re[k]! + x.im[k]! * x.im[k]!;
+      if (square > largest) {
+        pivot = k;
+        largest = square;
+      }
+    }
+    if (!(largest > 0)) return;
+    const at = swapped ? 1 - pivot : pivot;
+    const re = (y.re[at]! * x.re[pivot]! + y.im[at]! * x.im[pivot]!) / largest;
+    const im = (y.im[at]! * x.re[pivot]! - y.re[at]! * x.im[pivot]!) / largest;
+    const allowed = CLOSE * Math.sqrt(largest) * (1 + Math.abs(re) + Math.abs(im));
+    for (let k = 0; k < n; k++) {
+      const j = swapped ? 1 - k : k;
+      const gapRe = y.re[j]! - (x.re[k]! * re - x.im[k]! * im);
+      const gapIm = y.im[j]! - (x.re[k]! * im + x.im[k]! * re);
+      if (!(Math.abs(gapRe) + Math.abs(gapIm) <= allowed)) return;
+    }
+    this.ratios.push(upToScale ? { re: 1, im: 0 } : { re, im });
   }
 }

@@ -20,10 +20,14 @@ export interface ChangedForm {
   readonly ratios: Ratios;
 }
 
+const ONE = { re: 1, im: 0 };
+
 /** What the tries of one search share. Every change is looked at in doubles at one point before it is built and proved. */
 export class SlipSearch {
   readonly answer: Values;
   readonly ratios: Ratios;
+  /** Value of ħ at the trial's point. */
+  readonly hbar: number;
   private features: Features | null = null;
   private forms: FormEvaluation[] | null = null;
   private readonly trees = new Map<TreeSlip, readonly { value: AnswerValue; ratios: Ratios }[]>();
@@ -36,7 +40,8 @@ export class SlipSearch {
     point.evaluate(Math.max(...wanted, ...given));
     const { kind } = reference;
     this.answer = comparable(kind, valuesOf(point, given));
-    this.ratios = new Ratios(trial, comparable(kind, valuesOf(point, wanted)), this.answer);
+    this.hbar = point.re[trial.context.environment.hbar]!;
+    this.ratios = this.ratiosBetween(comparable(kind, valuesOf(point, wanted)));
   }
 
   fits(slip: Slip): boolean {
@@ -50,11 +55,11 @@ export class SlipSearch {
         return slip.fits(trial);
       case 'tree':
         return this.changedTrees(slip).some(
-          ({ value, ratios }) => ratios.mayBeOne() && trial.compare(value, trial.answer),
+          ({ value, ratios }) => ratios.mayBe(ONE) && trial.compare(value, trial.answer),
         );
       case 'form':
         return this.changedForms(slip.change).some(
-          (form) => form.ratios.mayBeOne() && trial.compare(this.build(form), trial.answer),
+          (form) => form.ratios.mayBe(ONE) && trial.compare(this.build(form), trial.answer),
         );
     }
   }
@@ -71,7 +76,7 @@ export class SlipSearch {
     const { point } = this.trial;
     const nodes = nodesOf(value);
     point.evaluate(Math.max(...nodes));
-    return new Ratios(this.trial, this.seen(point, nodes), this.answer);
+    return this.ratiosBetween(this.seen(point, nodes));
   }
 
   /** The author's tree with a slip's change made, where it has a value. */
@@ -100,7 +105,7 @@ export class SlipSearch {
     for (const shape of this.shapes()) {
       for (const place of shape.places(change)) {
         shape.evaluate(change, place);
-        const ratios = new Ratios(this.trial, this.seen(shape, shape.roots), this.answer);
+        const ratios = this.ratiosBetween(this.seen(shape, shape.roots));
         if (ratios.isConstant) found.push({ shape, change, place, ratios });
       }
     }
@@ -123,9 +128,13 @@ export class SlipSearch {
     return comparable(this.trial.reference.kind, valuesOf(at, nodes));
   }
 
+  private ratiosBetween(values: Values): Ratios {
+    return new Ratios(this.trial.reference.kind, this.trial.context.options, values, this.answer);
+  }
+
   private ratioFits(factors: readonly Factor[]): boolean {
     for (const factor of factors) {
-      if (this.ratios.mayBe(factor) && this.isFactor(this.trial.reference, factor)) return true;
+      if (this.ratios.mayBe(factor.value(this.hbar)) && this.isFactor(this.trial.reference, factor)) return true;
     }
     return false;
   }

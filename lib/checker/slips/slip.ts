@@ -30,15 +30,19 @@ interface Named {
 
 /** A constant factor between reference and answer: its value where ħ has a given one, and its node. */
 export interface Factor {
-  readonly re: (hbar: number) => number;
-  readonly im: (hbar: number) => number;
+  readonly value: (hbar: number) => Complex;
   readonly node: (g: Graph, hbar: Node) => Node;
+}
+
+export interface Complex {
+  readonly re: number;
+  readonly im: number;
 }
 
 /** A real rational factor. */
 export const realFactor = (value: Rational): Factor => {
-  const re = toNumber(value);
-  return { re: () => re, im: () => 0, node: (g) => g.number(value) };
+  const constant = { re: toNumber(value), im: 0 };
+  return { value: () => constant, node: (g) => g.number(value) };
 };
 
 /** The answer is a constant times the reference. */
