@@ -25,6 +25,12 @@ export function asHalfmarkError(error: unknown): HalfmarkError {
   );
 }
 
+/** Words for a complaint for which a schema has none of its own: a field that is missing, or a choice that is none. */
+export const plainWords: z.core.$ZodErrorMap = (issue) => {
+  if (issue.input === undefined || issue.input === '') return 'Please fill this in.';
+  return issue.code === 'invalid_value' ? 'Please choose one of the offered.' : undefined;
+};
+
 /** A schema's complaint as `invalid`, one message for each field, by its dotted name. */
 export function invalidBy(error: z.ZodError): HalfmarkError {
   const fields: Record<string, string> = {};

@@ -9,7 +9,7 @@ import { withLogContext } from '@/lib/log';
 import { type ServiceContext } from '@/lib/services/context';
 import { type ActionResult } from './action-result';
 import { currentActor } from './current-actor';
-import { asHalfmarkError, invalidBy } from './fail';
+import { asHalfmarkError, invalidBy, plainWords } from './fail';
 import { formInput } from './form-input';
 
 type Service<Input, Value> = (context: ServiceContext, input: Input) => Promise<Value>;
@@ -53,7 +53,7 @@ async function run<Schema extends z.ZodType, Value>(
       if (!origin.allowed) throw new HalfmarkError('cross-origin', undefined, { log: origin.reason });
       const actor = await whoActs();
       if (actor === null) throw new HalfmarkError('signed-out');
-      const parsed = schema.safeParse(input instanceof FormData ? formInput(input) : input);
+      const parsed = schema.safeParse(input instanceof FormData ? formInput(input) : input, { error: plainWords });
       if (!parsed.success) throw invalidBy(parsed.error);
       const value = await inTransaction((transaction) => service({ actor, transaction, now: new Date() }, parsed.data));
       return { ok: true, value };

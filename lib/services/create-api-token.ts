@@ -13,7 +13,7 @@ const day = 24 * 60 * 60 * 1000;
 export const createApiTokenSchema = z.object({
   courseId: z.uuid(),
   name: z.string().trim().min(1, 'Write what it is for.').max(100, 'At most 100 characters.'),
-  scopes: z.array(z.enum(tokenScopes)).min(1, 'Choose at least one use.'),
+  scopes: z.array(z.enum(tokenScopes), 'Choose at least one use.').min(1, 'Choose at least one use.'),
   days: z.coerce.number('Write a number of days.').int().min(1, 'At least one day.').max(365, 'At most 365 days.'),
 });
 
