@@ -1,5 +1,6 @@
 /** The decoration `name =` before an answer, and the labels of values. */
 import { type Label } from './answer-tree';
+import { greekNames } from './characters';
 import { type Cursor } from './cursor';
 import { isSign } from './parse-sign';
 import { nesting } from './starts';
@@ -90,6 +91,6 @@ function labelOf(tokens: readonly Token[], from: number, to: number): Label | nu
     base += tokens[index]?.text ?? '';
     if (index < end - 1 && tokens[index]?.index !== null) return null;
   }
-  const printable = [...base].length === 1 || /^[A-Za-z]+$/.test(base);
+  const printable = /^(?:[A-Za-z]+|ħ|ℓ)$/.test(base) || greekNames.has(base);
   return printable ? { base, index: last.index ?? sign } : null;
 }

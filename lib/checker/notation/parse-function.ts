@@ -6,7 +6,7 @@ import { parseRun } from './parse-run';
 import { parseArguments, refuseCount } from './parse-arguments';
 import { type Token } from './token';
 import { type Expression, type FunctionName } from './tree';
-import { scalarFunctionType } from './typing';
+import { scalarFunctionType, withoutGroups } from './typing';
 import { inverseFunctions } from './vocabulary';
 
 /**
@@ -57,7 +57,7 @@ export function parseWrapper(cursor: Cursor, token: Token, name: 'sqrt' | 'abs' 
   }
   cursor.typed(scalarFunctionType(name, body.type), span);
   if (name === 'abs') return cursor.node({ node: 'absolute', type: 'scalar', span, body });
-  return cursor.node({ node: 'root', type: 'scalar', span, radicand: body, degree: 2 });
+  return cursor.node({ node: 'root', type: 'scalar', span, radicand: withoutGroups(body), degree: 2 });
 }
 
 /** argument = `(` sum `)` | `{` sum `}` | `[` … `]` | run */

@@ -7,7 +7,7 @@ import { parseNumber, parseVulgar } from './parse-number';
 import { isSign } from './parse-sign';
 import { type Token } from './token';
 import { type Expression } from './tree';
-import { isLiteralZero, quotientType, scalarFunctionType } from './typing';
+import { isLiteralZero, quotientType, scalarFunctionType, withoutGroups } from './typing';
 import { unknownName } from './unknown-name';
 import { type Meaning } from './vocabulary';
 
@@ -115,8 +115,7 @@ function parseRoot(cursor: Cursor): Expression {
   cursor.stateExpected = expected;
   const span = { start: token.start, end: cursor.previous().end };
   cursor.typed(scalarFunctionType('sqrt', radicand.type), span);
-  const inner = radicand.node === 'group' ? radicand.body : radicand;
-  return cursor.node({ node: 'root', type: 'scalar', span, radicand: inner, degree });
+  return cursor.node({ node: 'root', type: 'scalar', span, radicand: withoutGroups(radicand), degree });
 }
 
 function parseDegree(cursor: Cursor): number {

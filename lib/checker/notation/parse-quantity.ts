@@ -188,7 +188,9 @@ function namedUnits(cursor: Cursor, token: Token): readonly UnitFactor[] {
   let word = token.text;
   let { end } = token;
   const following = cursor.peek();
-  if (word === 'μ' && following.kind === 'letters' && token.command) {
+  const isMicro = word === 'μ' && token.command;
+  const isOhm = following.text === 'Ω' && following.command && !following.spaced;
+  if (following.kind === 'letters' && (isMicro || (isOhm && unitsOf(`${word}Ω`)))) {
     word += following.text;
     end = following.end;
     cursor.next();

@@ -1,10 +1,11 @@
 /** Answers that are two values or two pairs. */
+import { type Span } from '../diagnostics';
 import { type AnswerTree, type LabelledValue, type PairEntry, type ValuesNode } from './answer-tree';
 import { type Cursor } from './cursor';
 import { isWrapped, outsideBrackets, passLeftSide } from './left-side';
 import { type Token } from './token';
 import { type Expression } from './tree';
-import { nameOfType } from './typing';
+import { listLength, nameOfType, withoutGroups } from './typing';
 
 /**
  * values = [ left-side ] ( bracket entries close | entries )
@@ -35,9 +36,25 @@ export function parseValues(cursor: Cursor, end: number): AnswerTree | null {
   const separated = isSeparated(tokens, from, end);
   const entries = parseEntries(cursor, from, end);
   const [first] = entries;
-  if (first && !separated && first.value.type === 'list') return first.value;
+  if (first && !separated && first.value.type === 'list') return listed(cursor, first.value);
   const span = { start: first?.span.start ?? 0, end: entries[entries.length - 1]?.span.end ?? 0 };
   return valuesOf(cursor, { node: 'values', span, bracket: 'none', entries });
+}
+
+/** A list is the set of its entries; a multiplied list, or one that a reference function gives, stays an expression. */
+function listed(cursor: Cursor, expression: Expression): AnswerTree | null {
+  const list = withoutGroups(expression);
+  if (list.node === 'list' && list.bracket !== 'column') {
+    const entries = list.entries.map((value) => ({ span: value.span, label: null, value }));
+    return valuesOf(cursor, { node: 'values', span: expression.span, bracket: list.bracket, entries });
+  }
+  refuseCount(cursor, listLength(expression) * (hasPlusMinus(expression) ? 2 : 1), expression.span);
+  return cursor.problem ? null : expression;
+}
+
+function refuseCount(cursor: Cursor, count: number, span: Span): void {
+  if (count <= 2) return;
+  cursor.fail('value-count', span, `A two-level operator has two eigenvalues; here stand ${count} values.`);
 }
 
 function isSeparated(tokens: readonly Token[], from: number, to: number): boolean {
@@ -80,9 +97,7 @@ function valuesOf(cursor: Cursor, values: ValuesNode): ValuesNode | null {
     }
     count += hasPlusMinus(value) ? 2 : 1;
   }
-  if (count > 2) {
-    cursor.fail('value-count', values.span, `A two-level operator has two eigenvalues; here stand ${count} values.`);
-  }
+  refuseCount(cursor, count, values.span);
   return cursor.problem ? null : values;
 }
 

@@ -61,6 +61,8 @@ export function unitOf(word: string): NamedUnit | null {
   for (const length of [1, 2]) {
     const prefix = prefixes.get(word.slice(0, length));
     const entry = entries.get(word.slice(length));
+    // Before a command the h would be the Planck constant.
+    if (prefix === 'h' && entry?.unit === 'ohm') return null;
     if (prefix !== undefined && entry?.takesPrefix) return { prefix, unit: entry.unit };
   }
   return null;
