@@ -21,7 +21,7 @@ export function inWords(name: string): string {
 function valueInWords(value: unknown): string {
   if (value === null || value === undefined || value === '') return 'none';
   if (typeof value === 'boolean') return value ? 'yes' : 'no';
-  if (typeof value === 'string') return isId(value) ? `${value.slice(0, 8)}…` : value;
+  if (typeof value === 'string') return textInWords(value);
   if (typeof value === 'number') return String(value);
   if (Array.isArray(value)) return value.length === 0 ? 'none' : value.map(valueInWords).join(', ');
   if (typeof value === 'object' && 'from' in value && 'to' in value) {
@@ -29,6 +29,14 @@ function valueInWords(value: unknown): string {
     return from === to ? '' : `${from} → ${to}`;
   }
   return '';
+}
+
+/** An id is cut short, a moment is written to the minute, a name in kebab case stays. */
+function textInWords(text: string): string {
+  if (isId(text)) return `${text.slice(0, 8)}…`;
+  return /^\d{4}-\d\d-\d\dT\d\d:\d\d:\d\d\.\d{3}Z$/.test(text)
+    ? `${text.slice(0, 10)} ${text.slice(11, 16)} UTC`
+    : text;
 }
 
 /** Ids mean nothing to a reader in full; their beginning tells two apart. */

@@ -38,7 +38,8 @@ const conditions = `
 export async function auditEvents(filter: AuditFilter): Promise<{ lines: AuditLine[]; total: number }> {
   const rows = await database().query<AuditLine & { total: number }>(
     `select e.id::text as id, e.at, e.action, c.code as "courseCode", e.subject_kind as "subjectKind",
-            coalesce(subject_user.name, subject_section.name, e.details->>'name', e.subject_id) as subject,
+            coalesce(subject_user.name, subject_section.name, subject_token.name, subject_template.name,
+                     'set ' || subject_set.number || ', ' || subject_set.title, e.details->>'name', e.subject_id) as subject,
             e.details, count(*) over ()::integer as total,
             coalesce(u.name, 'token ' || t.name, 'Halfmark, ' || (e.details->>'by'), 'Halfmark') as who
        from audit_events e
@@ -47,6 +48,9 @@ export async function auditEvents(filter: AuditFilter): Promise<{ lines: AuditLi
        left join courses c on c.id = e.course_id
        left join users subject_user on e.subject_kind = 'user' and subject_user.id::text = e.subject_id
        left join sections subject_section on e.subject_kind = 'section' and subject_section.id::text = e.subject_id
+       left join api_tokens subject_token on e.subject_kind = 'api-token' and subject_token.id::text = e.subject_id
+       left join templates subject_template on e.subject_kind = 'template' and subject_template.id::text = e.subject_id
+       left join problem_sets subject_set on e.subject_kind = 'problem-set' and subject_set.id::text = e.subject_id
        ${conditions}
       order by e.at desc, e.id desc
       limit :limit offset :offset`,

@@ -5,6 +5,7 @@ import { canChangeMembership } from '@/lib/policies/can-change-membership';
 import { requireAllowed } from '@/lib/policies/decide';
 import { courseForActor } from '@/lib/queries/course-for-actor';
 import { Membership } from '@/models/membership';
+import { Section } from '@/models/section';
 import { SectionGrader } from '@/models/section-grader';
 import { type ServiceContext } from './context';
 import { placeInSections } from './place-in-sections';
@@ -29,7 +30,7 @@ export async function changeMembership(
   const { transaction, actor } = context;
   const course = await courseForActor(actor, input.courseId, transaction);
   const membership = await presentMembership(context, input);
-  const before = { role: membership.role, sections: await sectionIdsOf(context, membership) };
+  const before = { role: membership.role, sections: await sectionNamesOf(context, membership) };
   const change = { userId: membership.userId, from: before.role, to: input.role };
   requireAllowed(canChangeMembership(actor, course, change));
   await placeInSections(context, membership, input);
@@ -39,7 +40,7 @@ export async function changeMembership(
     subject: { kind: 'user', id: membership.userId },
     details: {
       role: { from: before.role, to: input.role },
-      sections: { from: before.sections, to: await sectionIdsOf(context, membership) },
+      sections: { from: before.sections, to: await sectionNamesOf(context, membership) },
     },
   });
 }
@@ -58,8 +59,10 @@ export async function presentMembership(
   return membership;
 }
 
-async function sectionIdsOf({ transaction }: ServiceContext, membership: Membership): Promise<string[]> {
-  if (membership.sectionId !== null) return [membership.sectionId];
+/** The sections of a membership by name, as the log keeps them. */
+async function sectionNamesOf({ transaction }: ServiceContext, membership: Membership): Promise<string[]> {
   const graded = await SectionGrader.findAll({ where: { membershipId: membership.id }, transaction });
-  return graded.map((row) => row.sectionId).sort();
+  const ids = [membership.sectionId, ...graded.map((row) => row.sectionId)].filter((id) => id !== null);
+  const sections = await Section.findAll({ where: { id: ids }, order: [['name', 'ASC']], transaction });
+  return sections.map((section) => section.name);
 }
