@@ -85,7 +85,8 @@ export class Graph {
 
   /** Empties a graph that is no longer needed and keeps its storage for the next check. */
   static release(graph: Graph): void {
-    if (graph.size > RETAINED_NODES || graph.buffers.length > RETAINED_BUFFERS) return;
+    if (graph.size > RETAINED_NODES) return;
+    if (graph.buffers.length > RETAINED_BUFFERS) graph.buffers.length = RETAINED_BUFFERS;
     graph.clear();
     spare = graph;
   }

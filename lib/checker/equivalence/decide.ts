@@ -1,7 +1,7 @@
 import { type Graph, type Node } from '../algebra/graph';
 import { highPrecisionDifference, type PreciseSides } from './high-precision';
 import { type ModularOutcome, modularTest } from './modular';
-import { type NumericPoint } from './numeric';
+import { NumericPoint } from './numeric';
 import { type Proof } from './proof';
 import { type SamplePoints } from './sample-points';
 import { type Pair } from './size-bound';
@@ -142,15 +142,18 @@ function settleBranches(
 ): Decision {
   let settled = 0;
   const patterns = 2 ** outcome.kernels.length;
+  const flips = Array.from({ length: patterns }, (_, p) => new Set(outcome.kernels.filter((_, j) => (p >> j) & 1)));
+  let branch: NumericPoint | null = null;
   for (let k = 0; k < SEARCH_POINTS; k++) {
     const point = points.at(k);
     if (!point) continue;
     const principal = differingPair(pairs, point);
     if (principal === 'unknown') continue;
+    branch ??= new NumericPoint(point.graph, point.values);
     let vanishing = 0;
     let clear = true;
     for (let pattern = 0; pattern < patterns && clear; pattern++) {
-      const branch = onBranch(point, new Set(outcome.kernels.filter((_, j) => (pattern >> j) & 1)));
+      branch.moveTo(point, flips[pattern]!);
       const differs = differingPair(pairs, branch);
       if (differs === 'unknown') clear = false;
       else if (differs === null) vanishing++;
@@ -161,10 +164,4 @@ function settleBranches(
     return { status: 'equal', test: 'modular and numeric', proof: { ...proofOf(outcome), points: usable } };
   }
   return { status: 'undecided', reason: 'the branches of the roots could not be told apart' };
-}
-
-function onBranch(point: NumericPoint, flipped: ReadonlySet<Node>): NumericPoint {
-  const branch = point.copy();
-  branch.flipped = flipped;
-  return branch;
 }

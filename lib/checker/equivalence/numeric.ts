@@ -3,6 +3,8 @@ import { isInteger, toNumber } from '../algebra/rational';
 
 /** Unit roundoff with room for the library's elementary functions, which are within a few units in the last place. */
 const U = 2.3e-16;
+/** Room for nodes that are built after a point: then it need not be enlarged. */
+const SPARE_NODES = 128;
 
 /**
  * Values of a graph's nodes at one point in complex doubles, each with a bound on its absolute error by running error
@@ -19,24 +21,26 @@ export class NumericPoint {
   constructor(
     readonly graph: Graph,
     /** Value of each variable, by index; the sign of one that an assumption determines up to its sign. */
-    readonly values: Float64Array,
+    public values: Float64Array,
   ) {
-    const size = graph.op.length;
+    const size = graph.size + SPARE_NODES;
     this.re = graph.buffer(size);
     this.im = graph.buffer(size);
     this.error = graph.buffer(size);
   }
 
-  /** The same point, to be evaluated anew. */
-  copy(): NumericPoint {
-    return new NumericPoint(this.graph, this.values);
+  /** Makes this the same point as another, on other branches, to be evaluated anew. */
+  moveTo(point: NumericPoint, flipped: ReadonlySet<Node>): void {
+    this.values = point.values;
+    this.flipped = flipped;
+    this.done = 0;
   }
 
   /** Evaluates every node up to and including `last`. */
   evaluate(last: Node): void {
     const g = this.graph;
     if (last < this.done) return;
-    if (g.size > this.re.length) this.enlarge(g.op.length);
+    if (last >= this.re.length) this.enlarge(g.op.length);
     g.spend(2 * (last + 1 - this.done));
     for (let node = this.done; node <= last; node++) this.step(node);
     this.done = last + 1;
