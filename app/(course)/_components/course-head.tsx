@@ -52,7 +52,7 @@ export function SetHead({
   const nav: (NavItem & { needs: Ability; is: SetPage })[] = [
     { label: 'Set', href: paths.set(...at), needs: 'view-problem-sets', is: 'set' },
     { label: 'Intake', href: paths.intakes(...at), needs: 'take-in-answers', is: 'intake' },
-    { label: 'Queue', href: paths.queue(...at), needs: 'work-queue', is: 'queue', count: waiting },
+    { label: 'Queue', href: paths.queue(...at), needs: 'work-queue', is: 'queue', count: waiting || undefined },
     { label: 'Release', href: paths.release(...at), needs: 'release-scores', is: 'release' },
     { label: 'Deliveries', href: paths.deliveries(...at), needs: 'release-scores', is: 'deliveries' },
     { label: 'Consistency', href: paths.consistency(...at), needs: 'view-consistency', is: 'consistency' },

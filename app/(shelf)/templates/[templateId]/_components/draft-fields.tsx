@@ -79,13 +79,15 @@ export function Entry({
   children: ReactNode;
 }) {
   return (
-    <div role="group" aria-label={label} className="grid gap-3 border-l border-hairline pl-4">
-      {children}
-      <div>
-        <Button look="plain" onClick={onRemove} aria-label={removeWords} className="text-small">
-          Remove
-        </Button>
-      </div>
+    <div
+      role="group"
+      aria-label={label}
+      className="grid grid-cols-[minmax(0,1fr)_auto] items-start gap-x-4 border-l border-hairline pl-4"
+    >
+      <div className="grid min-w-0 gap-3">{children}</div>
+      <Button look="plain" onClick={onRemove} aria-label={removeWords} className="text-small">
+        Remove
+      </Button>
     </div>
   );
 }

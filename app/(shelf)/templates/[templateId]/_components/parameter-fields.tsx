@@ -14,7 +14,10 @@ interface ParameterFieldsProps {
 export function ParameterFields({ parameters, change }: ParameterFieldsProps) {
   const add = (type: DraftParameter['type']) => change([...parameters, emptyParameter(type)]);
   return (
-    <SourceGroup title="Drawn values" hint="Each student gets their own, and keeps them.">
+    <SourceGroup
+      title="Drawn values"
+      hint="Each student gets their own, and keeps them. A whole number is drawn from a range; a choice from values in the answer language: numbers, operators or states."
+    >
       {parameters.map((parameter, index) => {
         const set = (next: Partial<DraftParameter>) => change(replaced(parameters, index, next));
         const path = `parameters.${index}`;
@@ -27,7 +30,7 @@ export function ParameterFields({ parameters, change }: ParameterFieldsProps) {
             onRemove={() => change(without(parameters, index))}
           >
             {parameter.type === 'integer' ? (
-              <div className="grid max-w-form grid-cols-3 gap-3">
+              <div className="grid grid-cols-3 items-end gap-3 sm:grid-cols-[1.2fr_1fr_1fr_1.6fr]">
                 <DraftField
                   path={`${path}.name`}
                   label="Name"
@@ -51,20 +54,17 @@ export function ParameterFields({ parameters, change }: ParameterFieldsProps) {
                   value={parameter.to}
                   onText={(to) => set({ to })}
                 />
-                <div className="col-span-3">
-                  <DraftField
-                    path={`${path}.except`}
-                    label="Except"
-                    optional
-                    mono
-                    hint="Whole numbers left out, between commas."
-                    value={parameter.except}
-                    onText={(except) => set({ except })}
-                  />
-                </div>
+                <DraftField
+                  path={`${path}.except`}
+                  label="Except"
+                  mono
+                  placeholder="none"
+                  value={parameter.except}
+                  onText={(except) => set({ except })}
+                />
               </div>
             ) : (
-              <div className="grid max-w-form gap-3">
+              <div className="grid items-start gap-3 sm:grid-cols-[1.2fr_3.6fr]">
                 <DraftField
                   path={`${path}.name`}
                   label="Name"
@@ -74,10 +74,9 @@ export function ParameterFields({ parameters, change }: ParameterFieldsProps) {
                 />
                 <DraftArea
                   path={`${path}.values`}
-                  label="One of"
-                  hint="One value a line, in the answer language: numbers, operators or states."
+                  label="One of, a line each"
                   mono
-                  rows={3}
+                  rows={2}
                   value={parameter.values}
                   onText={(values) => set({ values })}
                 />

@@ -72,7 +72,7 @@ function PartEntry({ part, index, set, remove }: PartEntryProps) {
         value={part.prompt}
         onText={(prompt) => set({ prompt })}
       />
-      <div className="grid max-w-form grid-cols-[1fr_7rem] gap-3">
+      <div className="grid max-w-form grid-cols-[1fr_6rem] gap-3">
         <Select
           name={`${path}.kind`}
           label="Kind of answer"
@@ -91,7 +91,6 @@ function PartEntry({ part, index, set, remove }: PartEntryProps) {
           onText={(weight) => set({ weight })}
         />
       </div>
-      <OptionFields part={part} path={path} set={(options) => set({ options: { ...part.options, ...options } })} />
       <DraftArea
         path={`${path}.reference`}
         label={part.kind === 'choice' ? 'The right label' : 'Reference'}
@@ -100,6 +99,7 @@ function PartEntry({ part, index, set, remove }: PartEntryProps) {
         value={part.reference}
         onText={(reference) => set({ reference })}
       />
+      <OptionFields part={part} path={path} set={(options) => set({ options: { ...part.options, ...options } })} />
       {part.kind === 'choice' ? null : <CreditFields part={part} path={path} set={set} />}
       <Checkbox
         name={`${path}.alwaysPerson`}

@@ -19,8 +19,8 @@ export function ShareField({ name, share, onShare }: ShareFieldProps) {
   return (
     <Field
       name={name}
-      label="Credit, per cent"
-      hint="Empty: a person"
+      label="Credit, %"
+      hint="Empty: a person decides"
       optional
       inputMode="decimal"
       value={typed}

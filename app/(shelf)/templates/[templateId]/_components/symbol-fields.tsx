@@ -37,7 +37,7 @@ export function SymbolFields({ symbols, change }: SymbolFieldsProps) {
             removeWords={`Remove ${called}`}
             onRemove={() => change(without(symbols, index))}
           >
-            <div className="grid max-w-form grid-cols-2 gap-3">
+            <div className="grid grid-cols-2 items-end gap-3">
               <DraftField
                 path={`${path}.name`}
                 label="Name"

@@ -50,7 +50,7 @@ export function TemplateEditor({ templateId, mayWrite, nextNumber, slips, ...ini
           </SlipContext>
         </fieldset>
         <div className="mt-10 min-w-0 border-margin-line lg:mt-0 lg:border-l-2 lg:pl-8">
-          <div className="editor-result grid gap-6">
+          <div className="grid gap-6 lg:sticky lg:top-4 lg:max-h-[calc(100dvh-2rem)] lg:overflow-y-auto lg:pr-1">
             {mayWrite ? (
               <div className="flex flex-wrap items-center justify-between gap-x-6 gap-y-2">
                 <SaveLine status={state.status} />

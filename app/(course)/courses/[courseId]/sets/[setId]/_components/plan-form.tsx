@@ -77,7 +77,7 @@ export function PlanForm({ ids, zone, begun, closed, plan }: PlanFormProps) {
         <Share
           name="secondMarkingRate"
           label="Second marking"
-          hint="of rulings, blind"
+          hint="of rulings"
           value={policy.secondMarkingRate}
           error={faults.secondMarkingRate}
         />
@@ -91,7 +91,7 @@ export function PlanForm({ ids, zone, begun, closed, plan }: PlanFormProps) {
         <Share
           name="settleTolerance"
           label="To settle above"
-          hint="of a part’s marks apart"
+          hint="of marks apart"
           value={policy.settleTolerance}
           error={faults.settleTolerance}
         />
