@@ -26,9 +26,12 @@ export class FormEvaluation {
     point.evaluate(size - 1);
   }
 
-  /** Whether there are sines, cosines, exponentials or roots, which a normal form may write otherwise. */
+  /** Whether there are sines, cosines or exponentials, which a normal form may write otherwise. */
   get hasFunctions(): boolean {
-    return this.nodes.some((node) => this.g.op[node]! >= Op.Root);
+    return this.nodes.some((node) => {
+      const op = this.g.op[node]!;
+      return op === Op.Exp || op === Op.Sin || op === Op.Cos;
+    });
   }
 
   private readonly placesOf = new Map<FormChange, readonly Place[]>();

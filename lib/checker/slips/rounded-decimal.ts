@@ -5,6 +5,7 @@ import { answerValue } from '../kinds/answer-value';
 import { type NumericPoint } from '../equivalence/numeric';
 import { type TestSlip, type Trial } from './slip';
 import { rewriteAll } from './tree-changes';
+import { visit } from './visit';
 
 /** An exact number was replaced by a decimal that rounds to it. */
 export const roundedDecimal: TestSlip = {
@@ -23,9 +24,8 @@ export const roundedDecimal: TestSlip = {
 /** Distinct decimals of a tree, each of which may be a rounded value. */
 function decimalsOf(tree: AnswerTree): NumberNode[] {
   const found = new Map<string, NumberNode>();
-  rewriteAll(tree, (node) => {
+  visit(tree, (node) => {
     if (node.node === 'number' && node.decimal && node.decimals > 0) found.set(node.mantissa, node);
-    return node;
   });
   return [...found.values()];
 }
