@@ -27,7 +27,7 @@ const verdict = (reference: string, answer: string): string => {
   }
 };
 
-describe('equality of scalars', () => {
+describe('equality of scalars', { timeout: 60_000 }, () => {
   it('is reflexive', () => {
     fc.assert(
       fc.property(scalar, (a) => ['agrees', 'undecided'].includes(verdict(a, a)) || verdict(a, a).includes('no value')),

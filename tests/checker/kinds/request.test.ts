@@ -36,7 +36,7 @@ describe('a bad request', () => {
   });
 });
 
-describe('any request', () => {
+describe('any request', { timeout: 60_000 }, () => {
   it('is answered without a throw, and the same twice', () => {
     const pieces = fc.constantFrom(
       'x',
@@ -119,7 +119,7 @@ describe('any request', () => {
     ]) {
       const started = performance.now();
       check({ id: 'm', kind: 'scalar', reference: 'x', answer: monster, symbols: { x: 'real' } });
-      expect(performance.now() - started).toBeLessThan(1000);
+      expect(performance.now() - started).toBeLessThan(10_000);
     }
   });
 });
