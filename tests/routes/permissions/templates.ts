@@ -40,7 +40,8 @@ export const rows: readonly Row[] = [
     kind: 'page',
     file: `${shelf}/[templateId]/page.tsx`,
     path: (scene) => paths.template(scene.template.id),
-    expect: ['sign-in', 'hide', 'allow', 'allow', 'allow', 'allow', 'hide'],
+    // A student of a course that uses it is told that it is closed to them, not that it is not there.
+    expect: ['sign-in', 'refuse', 'allow', 'allow', 'allow', 'allow', 'hide'],
   },
   {
     kind: 'action',
