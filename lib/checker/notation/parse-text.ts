@@ -1,6 +1,6 @@
 /** From text to tree, in every common reading, by a given grammar. */
-import { type Diagnostic } from '../diagnostics';
-import { type ParseResult, type ReadingContext } from './answer-tree';
+import { type Diagnostic, type Span } from '../diagnostics';
+import { type AnswerKind, type ParseResult, type ReadingContext } from './answer-tree';
 import { pairBars } from './bars';
 import { choices, Cursor, type Grammar } from './cursor';
 import { findDecimalComma } from './decimal-comma';
@@ -27,12 +27,17 @@ export function parseText(grammar: Grammar, text: string, context: ReadingContex
   const refused = refuseLength(text);
   if (refused) return { ...noOne, diagnostics: [refused] };
   if (context.kind === 'choice') return { ...noOne, ...parseChoice(text, context.options?.choices ?? []) };
-  const scope = scopeOf(context);
-  if (scope.problems) return { ...noOne, diagnostics: scope.problems };
-  const first = readOnce(grammar, text, context, scope.scope, 0);
+  const { scope, problems } = scopeOf(context);
+  if (problems) return { ...noOne, diagnostics: problems };
+  const prepared = prepare(text, context, scope, false);
+  const first = readPrepared(grammar, prepared, context.kind, scope, 0);
   if (first.tree === null) return { ...noOne, diagnostics: first.problem ? [first.problem] : [] };
   if (first.met === 0) return { tree: first.tree, diagnostics: [], ambiguous: false, alternatives: [] };
-  const again = (taken: number): Reading => readOnce(grammar, text, context, scope.scope, taken);
+  const again = (taken: number): Reading => {
+    const other = (taken & choices.split) !== 0;
+    const source = other ? prepare(text, context, scope, true) : prepared;
+    return readPrepared(grammar, source, context.kind, scope, taken);
+  };
   const { alternatives, diagnostic } = otherReadings(first, first.tree, again);
   return {
     tree: first.tree,
@@ -67,29 +72,45 @@ export function scopeOf(context: ReadingContext): {
   return { scope, problems: checkNames(names).map((problem) => ({ ...problem, span: nowhere })) };
 }
 
-/** One reading, with the other side taken of the given choices. */
-function readOnce(grammar: Grammar, text: string, context: ReadingContext, scope: Scope, taken: number): Reading {
-  const { kind } = context;
-  const other = (taken & choices.split) !== 0;
+/** A text ready to be parsed: names resolved, bars paired, the unit of a quantity last. */
+interface Prepared {
+  readonly tokens: readonly Token[];
+  readonly problem: Diagnostic | null;
+  /** Where the expression ends, and where the unit after it does. */
+  readonly end: number;
+  readonly unitEnd: number;
+  /** Where letters or a number could be split in another way. */
+  readonly doubtful: Span | null;
+}
+
+/** The tokens of a text; with `other`, letters and numbers that could be split in two ways are split the other way. */
+function prepare(text: string, { kind }: ReadingContext, scope: Scope, other: boolean): Prepared {
   const { tokens, problem, lowerExponentUsed } = tokenise(text, {
     kets: true,
     plusMinus: kind === 'eigenvalues' || kind === 'eigenpairs',
     lowerExponent: !(other && scope.declaresE),
     upperExponent: !scope.declaresCapitalE,
   });
-  if (problem) return { tree: null, problem, met: 0, places: null };
   const comma = kind === 'scalar' || kind === 'quantity' ? findDecimalComma(tokens) : null;
-  if (comma) return { tree: null, problem: comma, met: 0, places: null };
+  const first = problem ?? comma;
+  if (first) return { tokens, problem: first, end: 0, unitEnd: 0, doubtful: null };
+  const whole = { start: 0, end: tokens[tokens.length - 1]?.end ?? 0 };
   const unit = kind === 'quantity' ? takeUnit(tokens) : [];
   const words = resolveWords(tokens, scope, other);
   const bars = pairBars(words.tokens);
-  if (bars) return { tree: null, problem: bars, met: 0, places: null };
   const end = words.tokens.length - 1;
   if (unit.length > 0) words.tokens.splice(end, 0, ...unit);
-  const cursor = new Cursor(words.tokens, scope, grammar, taken);
-  const tree = kind === 'quantity' ? parseQuantity(cursor, end, end + unit.length) : parseAnswer(cursor, kind, end);
-  if (words.ambiguous) cursor.meet(choices.split, words.ambiguous);
-  else if (lowerExponentUsed && scope.declaresE) cursor.meet(choices.split, { start: 0, end: text.length });
+  const doubtful = words.ambiguous ?? (lowerExponentUsed && scope.declaresE ? whole : null);
+  return { tokens: words.tokens, problem: bars, end, unitEnd: end + unit.length, doubtful };
+}
+
+/** One reading of prepared tokens, with the other side taken of the given choices. */
+function readPrepared(grammar: Grammar, prepared: Prepared, kind: AnswerKind, scope: Scope, taken: number): Reading {
+  const { tokens, problem, end, unitEnd, doubtful } = prepared;
+  if (problem) return { tree: null, problem, met: 0, places: null };
+  const cursor = new Cursor(tokens, scope, grammar, taken);
+  const tree = kind === 'quantity' ? parseQuantity(cursor, end, unitEnd) : parseAnswer(cursor, kind, end);
+  if (doubtful) cursor.meet(choices.split, doubtful);
   return { tree: cursor.problem ? null : tree, problem: cursor.problem, met: cursor.met, places: cursor.places };
 }
 

@@ -57,12 +57,15 @@ const pairs: readonly (readonly [string, string, string, AnswerKind?, 'charge'?]
 ];
 
 describe('texts that people write both ways', () => {
-  it.each(pairs)('%s', (text, rule, other, kind = 'scalar', charge) => {
-    const { main, others } = structures(text, kind, charge === 'charge');
-    expect(main).toBe(structures(rule, kind, charge === 'charge').main);
-    expect(others).toContain(structures(other, kind, charge === 'charge').main);
-    expect(new Set([main, ...others]).size).toBe(others.length + 1);
-  });
+  it.each(pairs.map(([text, rule, other, kind, charge]) => ({ text, rule, other, kind: kind ?? 'scalar', charge })))(
+    '$text',
+    ({ text, rule, other, kind, charge }) => {
+      const { main, others } = structures(text, kind, charge === 'charge');
+      expect(main).toBe(structures(rule, kind, charge === 'charge').main);
+      expect(others).toContain(structures(other, kind, charge === 'charge').main);
+      expect(new Set([main, ...others]).size).toBe(others.length + 1);
+    },
+  );
 
   it('gives both readings of each of two doubtful places', () => {
     const { others } = structures('e^iφ sin θ/2', 'scalar', false);
