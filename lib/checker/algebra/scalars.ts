@@ -178,6 +178,7 @@ export function cos(g: Graph, x: Node): Node {
   const turns = halfTurnsOf(g, x);
   const known = turns && cosineOfTurns(g, turns);
   if (known !== null) return known;
+  if (g.op[x] === Op.Abs) return cos(g, g.a[x]!);
   const even = isNegative(coefficientOf(g, x)) ? negate(g, x) : x;
   return g.node(Op.Cos, even, 0, g.flags[x]! & (Flag.Real | Flag.Imaginary) ? Flag.Real : 0);
 }

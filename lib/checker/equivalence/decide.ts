@@ -4,7 +4,8 @@ import { type ModularOutcome, modularTest } from './modular';
 import { NumericPoint } from './numeric';
 import { type Proof } from './proof';
 import { type SamplePoints } from './sample-points';
-import { type Pair } from './size-bound';
+import { sameOnEverySign } from './sign-cases';
+import { ERROR_BOUND, type Pair } from './size-bound';
 import { sameByExponential } from './exponential-test';
 
 /**
@@ -39,8 +40,9 @@ export function decideEqual(g: Graph, pairs: readonly Pair[], points: SamplePoin
   const decision = decideDirectly(g, pairs, points, seed);
   if (decision.status !== 'undecided') return decision;
   const open = pairs.filter(([x, y]) => x !== y);
-  const proof = sameByExponential(g, open, points, (others) => decideDirectly(g, others, points, seed));
-  if (proof) return { status: 'equal', test: 'modular and numeric', proof };
+  const decide = (others: readonly Pair[]): Decision => decideDirectly(g, others, points, seed);
+  const proof = sameByExponential(g, open, points, decide) ?? sameOnEverySign(g, open, decide);
+  if (proof && proof.bound <= ERROR_BOUND) return { status: 'equal', test: 'modular and numeric', proof };
   return preciseWitness(pairs, points) ?? decision;
 }
 

@@ -1,6 +1,7 @@
 import { type Graph, type Node, Op } from '../algebra/graph';
+import { nodesUnder } from '../algebra/rebuild';
 import { type NumericPoint } from '../equivalence/numeric';
-import { appliesAt, type FormChange, isPlace, nodesUnder, type Place } from './form-change';
+import { appliesAt, type FormChange, isPlace, type Place } from './form-change';
 
 const MOST_PLACES = 8;
 

@@ -6,7 +6,7 @@ import { type AnswerValue, answerValue } from '../kinds/answer-value';
 import { nodesOf } from '../kinds/compare';
 import { failureOf } from '../kinds/prepare';
 import { featuresOf, type Features } from './features';
-import { type FormChange, type Place, rebuild } from './form-change';
+import { type FormChange, type Place, rebuildChanged } from './form-change';
 import { FormEvaluation } from './form-evaluation';
 import { comparable, looksEqual, type NodeValues, type Values, valuesOf } from './numeric-match';
 import { Ratios } from './ratios';
@@ -115,7 +115,7 @@ export class SlipSearch {
 
   /** Builds a changed form exactly. */
   build({ shape, change, place }: ChangedForm): AnswerValue {
-    const built = rebuild(this.trial.context.environment.g, shape.roots, change, place);
+    const built = rebuildChanged(this.trial.context.environment.g, shape.roots, change, place);
     let k = 0;
     const next = (): Node => {
       const root = shape.roots[k++]!;
