@@ -71,12 +71,14 @@ function renderTerm(term: Term): { sign: string; body: string } | null {
   let sign = term.sign;
   let body = '';
   let closeAtEnd = '';
-  let skipOperator = false;
+  // After a factor 1 that is left out, the blanks and the product sign behind it are left out, too.
+  let leftOut = false;
   for (const item of term.items) {
     const place = solid.indexOf(item);
     if (item.item !== 'slot') {
-      if (item.item === 'operator' && skipOperator) skipOperator = false;
-      else body = joined(body, item.text);
+      if (leftOut && (item.item === 'space' || item.item === 'operator')) continue;
+      leftOut = false;
+      body = joined(body, item.text);
       continue;
     }
     const before = solid[place - 1];
@@ -85,7 +87,7 @@ function renderTerm(term: Term): { sign: string; body: string } | null {
       const first = renderFirst(item.value, sign, after);
       sign = first.sign;
       body = joined(body, first.text);
-      skipOperator = first.text === '' && after?.item === 'operator';
+      leftOut = first.text === '';
     } else if (before.item === 'function' && (item.value.negative || item.value.isSum)) {
       const bare = item.value.isOne && after?.item === 'factor' ? '-' : item.value.latex;
       body = joined(body, `\\left(${bare}`);

@@ -32,7 +32,7 @@ export function CreditFields({ part, path, set }: CreditFieldsProps) {
             removeWords={`Give ${given.slip} no credit`}
             onRemove={() => set({ slips: without(part.slips, index) })}
           >
-            <div className="grid items-end gap-3 sm:grid-cols-[1fr_10.5rem]">
+            <div className="grid items-end gap-3 sm:grid-cols-[1fr_11rem]">
               <Select
                 name={`${path}.slips.${index}.slip`}
                 label="Slip"
@@ -58,7 +58,7 @@ export function CreditFields({ part, path, set }: CreditFieldsProps) {
             removeWords={`Remove the expected answer ${wrong.id || index + 1}`}
             onRemove={() => set({ expected: without(part.expected, index) })}
           >
-            <div className="grid items-end gap-3 sm:grid-cols-[1fr_10.5rem]">
+            <div className="grid items-end gap-3 sm:grid-cols-[1fr_11rem]">
               <DraftField
                 path={`${path}.expected.${index}.id`}
                 label="Expected wrong answer"

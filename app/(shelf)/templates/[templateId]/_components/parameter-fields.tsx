@@ -54,14 +54,16 @@ export function ParameterFields({ parameters, change }: ParameterFieldsProps) {
                   value={parameter.to}
                   onText={(to) => set({ to })}
                 />
-                <DraftField
-                  path={`${path}.except`}
-                  label="Except"
-                  mono
-                  placeholder="none"
-                  value={parameter.except}
-                  onText={(except) => set({ except })}
-                />
+                <div className="col-span-3 sm:col-span-1">
+                  <DraftField
+                    path={`${path}.except`}
+                    label="Except"
+                    mono
+                    placeholder="none"
+                    value={parameter.except}
+                    onText={(except) => set({ except })}
+                  />
+                </div>
               </div>
             ) : (
               <div className="grid items-start gap-3 sm:grid-cols-[1.2fr_3.6fr]">

@@ -15,7 +15,7 @@ interface ResultProps {
 export function Result({ preview, stale }: ResultProps) {
   const { problems, draws } = preview;
   return (
-    <div aria-live="polite" className={`grid gap-6 transition-opacity ${stale ? 'opacity-70' : ''}`}>
+    <div className={`grid gap-6 transition-opacity ${stale ? 'opacity-70' : ''}`}>
       {problems.length > 0 ? <Problems problems={problems} /> : null}
       {draws.map((draw, index) => (
         <Draw key={index} draw={draw} number={index + 1} />
@@ -34,7 +34,9 @@ function Problems({ problems }: { problems: readonly TemplateProblem[] }) {
   const title = mistakes === 0 ? 'Worth a look' : mistakes === 1 ? 'One thing to mend' : `${mistakes} things to mend`;
   return (
     <section aria-label={title}>
-      <h2>{title}</h2>
+      <h2>
+        <span role="status">{title}</span>
+      </h2>
       <ul className="mt-2 grid gap-1.5 text-small">
         {problems.map((problem) => (
           <li key={problem.path + problem.message} className="flex gap-2">

@@ -20,7 +20,7 @@ export function ShareField({ name, share, onShare }: ShareFieldProps) {
     <Field
       name={name}
       label="Credit, %"
-      hint="Empty: a person decides"
+      hint="Empty: a person"
       optional
       inputMode="decimal"
       value={typed}
