@@ -1,6 +1,18 @@
+import { renderMarkdown } from '@/lib/markdown';
+
 /** One piece of a letter, in reading order. */
 export type LetterPart =
-  { kind: 'paragraph'; text: string } | { kind: 'link'; label: string; href: string } | { kind: 'note'; text: string };
+  | { kind: 'paragraph'; text: string }
+  | { kind: 'link'; label: string; href: string }
+  | { kind: 'note'; text: string }
+  | { kind: 'heading'; text: string }
+  /** A line that matters: a mark, a total. */
+  | { kind: 'strong'; text: string }
+  | { kind: 'list'; lines: readonly string[] }
+  /** What somebody typed, letter for letter, after a few words that say what it is. */
+  | { kind: 'typed'; label: string; text: string }
+  /** What a teacher wrote; its formulas stand as TeX, because a mail reader has no stylesheet of ours. */
+  | { kind: 'markdown'; label?: string; source: string };
 
 /** A message as it is written once; both its forms are made from this. */
 export type Letter = { subject: string; title: string; parts: readonly LetterPart[] };
@@ -12,6 +24,8 @@ const ink = '#1F2430';
 const faint = '#55606F';
 const blue = '#243F73';
 const paper = '#FBF8F1';
+const line = '#E3DCC8';
+const mono = "'Noto Sans Mono', Consolas, Menlo, monospace";
 const serif = "'Noto Serif', Georgia, 'Times New Roman', serif";
 
 /** Makes the two forms of a letter. The HTML uses no picture, no script and no address but those of its links. */
@@ -29,8 +43,17 @@ function renderText(letter: Letter): string {
   const parts = letter.parts.map((part) => {
     switch (part.kind) {
       case 'paragraph':
+      case 'strong':
       case 'note':
         return wrap(part.text);
+      case 'heading':
+        return `${wrap(part.text)}\n${'-'.repeat(Math.min(part.text.length, 76))}`;
+      case 'list':
+        return part.lines.map((line) => wrap(`- ${line}`)).join('\n');
+      case 'typed':
+        return `${part.label}:\n${indent(part.text)}`;
+      case 'markdown':
+        return part.label === undefined ? part.source.trim() : `${part.label}:\n${indent(part.source.trim())}`;
       case 'link':
         return `${part.label}:\n${part.href}`;
     }
@@ -43,6 +66,19 @@ function renderHtml(letter: Letter): string {
     switch (part.kind) {
       case 'paragraph':
         return `<p style="margin:0 0 16px">${escapeHtml(part.text)}</p>`;
+      case 'strong':
+        return `<p style="margin:0 0 16px;font-weight:bold">${escapeHtml(part.text)}</p>`;
+      case 'heading':
+        return `<h2 style="margin:28px 0 12px;padding-top:16px;border-top:1px solid ${line};font-size:18px;line-height:1.35">${escapeHtml(part.text)}</h2>`;
+      case 'list':
+        return `<ul style="margin:0 0 16px;padding-left:22px">${part.lines.map((text) => `<li>${escapeHtml(text)}</li>`).join('')}</ul>`;
+      case 'typed':
+        return (
+          `<p style="margin:0 0 12px">${labelHtml(part.label)}<code style="font-family:${mono};font-size:14px;` +
+          `white-space:pre-wrap;word-break:break-word">${escapeHtml(part.text)}</code></p>`
+        );
+      case 'markdown':
+        return `<div style="margin:0 0 12px">${part.label === undefined ? '' : labelHtml(part.label)}${renderMarkdown(part.source, { tex: 'source' })}</div>`;
       case 'note':
         return `<p style="margin:0 0 16px;color:${faint};font-size:14px">${escapeHtml(part.text)}</p>`;
       case 'link':
@@ -56,7 +92,7 @@ function renderHtml(letter: Letter): string {
 <div style="max-width:34rem;margin:0 auto;padding:32px 24px">
 <h1 style="margin:0 0 20px;font-size:22px;line-height:1.3">${escapeHtml(letter.title)}</h1>
 ${parts.join('\n')}
-<p style="margin:32px 0 0;padding-top:12px;border-top:1px solid #E3DCC8;color:${faint};font-size:14px">Halfmark</p>
+<p style="margin:32px 0 0;padding-top:12px;border-top:1px solid ${line};color:${faint};font-size:14px">Halfmark</p>
 </div>
 </body>
 </html>
@@ -70,6 +106,18 @@ function linkHtml(label: string, href: string): string {
     `color:#FFFFFF;text-decoration:none;border-radius:3px">${escapeHtml(label)}</a></p>\n` +
     `<p style="margin:0 0 16px;color:${faint};font-size:14px;word-break:break-all">${address}</p>`
   );
+}
+
+function labelHtml(label: string): string {
+  return `<span style="color:${faint};font-size:14px">${escapeHtml(label)}</span><br>`;
+}
+
+/** Sets a text of any number of lines apart, without breaking its lines. */
+function indent(text: string): string {
+  return text
+    .split(/\r?\n/)
+    .map((row) => `    ${row}`)
+    .join('\n');
 }
 
 /** Breaks lines at blanks so that none is longer than 76 characters, as mail readers expect of plain text. */
