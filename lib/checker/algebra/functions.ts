@@ -47,7 +47,10 @@ export function atan(g: Graph, x: Node): Node {
 export function atan2(g: Graph, y: Node, x: Node): Node {
   const length = squareRoot(g, add(g, power(g, x, 2), power(g, y, 2)));
   const direction = divide(g, add(g, x, multiply(g, g.i, y)), length);
-  return g.mark(minusITimes(g, ln(g, direction)), Flag.Real);
+  const logarithm = ln(g, direction);
+  // Of a number of modulus 1: that makes every product with it known to be real or imaginary.
+  if (logarithm !== g.zero) g.mark(logarithm, Flag.Imaginary);
+  return minusITimes(g, logarithm);
 }
 
 /** ln(x + √(x²+1)). */

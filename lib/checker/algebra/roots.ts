@@ -172,8 +172,11 @@ export function absolute(g: Graph, x: Node): Node {
   if (isNegative(c)) return absolute(g, negate(g, x));
   switch (g.op[x]) {
     case Op.Multiply:
+      // A real product may have factors that are not.
+      if (!g.has(g.a[x]!, Flag.Real) || !g.has(g.b[x]!, Flag.Real)) break;
       return multiply(g, absolute(g, g.a[x]!), absolute(g, g.b[x]!));
     case Op.Power:
+      if (!g.has(g.a[x]!, Flag.Real)) break;
       return power(g, absolute(g, g.a[x]!), g.b[x]!);
     case Op.Add: {
       const form = normalForm(g, x);

@@ -311,7 +311,10 @@ function powerFlags(flags: number, n: number): number {
     if (n % 2 === 0) return Flag.Real | Flag.NonNegative | nonZero;
     return (flags & (Flag.Real | Flag.NonNegative | Flag.NonPositive)) | nonZero;
   }
-  if (flags & Flag.Imaginary) return (n % 2 === 0 ? Flag.Real : Flag.Imaginary) | nonZero;
+  if (flags & Flag.Imaginary) {
+    if (n % 2 !== 0) return Flag.Imaginary | nonZero;
+    return Flag.Real | (n % 4 === 0 ? Flag.NonNegative : Flag.NonPositive) | nonZero;
+  }
   return nonZero;
 }
 

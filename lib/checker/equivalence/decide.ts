@@ -29,6 +29,8 @@ export type Decision =
 const NO_POINT = 'no point was found at which both sides are defined';
 const FIRST_POINTS = 2;
 const SEARCH_POINTS = 48;
+/** Points at which branches are told apart: so many that no piece of the domain is likely to be missed. */
+const BRANCH_POINTS = 240;
 /** A difference this many times its error bound is beyond rounding. */
 const MARGIN = 4;
 
@@ -61,7 +63,8 @@ function decideDirectly(g: Graph, pairs: readonly Pair[], points: SamplePoints, 
     if (search.usable === 0) return { status: 'undecided', reason: NO_POINT };
     return { status: 'equal', test: 'modular', proof: { ...proofOf(outcome), points: search.usable } };
   }
-  const found = search.upTo(SEARCH_POINTS, SEARCH_POINTS);
+  const many = outcome.status === 'branches' ? BRANCH_POINTS : SEARCH_POINTS;
+  const found = search.upTo(many, many);
   if (found) return found;
   if (outcome.status === 'branches') return settleBranches(open, outcome, points, search.usable);
   const reason =
@@ -146,7 +149,7 @@ function settleBranches(
   const patterns = 2 ** outcome.kernels.length;
   const flips = Array.from({ length: patterns }, (_, p) => new Set(outcome.kernels.filter((_, j) => (p >> j) & 1)));
   let branch: NumericPoint | null = null;
-  for (let k = 0; k < SEARCH_POINTS; k++) {
+  for (let k = 0; k < BRANCH_POINTS; k++) {
     const point = points.at(k);
     if (!point) continue;
     const principal = differingPair(pairs, point);
@@ -162,7 +165,7 @@ function settleBranches(
     }
     if (clear && vanishing === outcome.vanishing) settled++;
   }
-  if (settled >= SEARCH_POINTS / 3) {
+  if (settled >= BRANCH_POINTS / 3) {
     return { status: 'equal', test: 'modular and numeric', proof: { ...proofOf(outcome), points: usable } };
   }
   return { status: 'undecided', reason: 'the branches of the roots could not be told apart' };

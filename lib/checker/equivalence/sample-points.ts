@@ -11,6 +11,7 @@ export interface Requirement {
 }
 
 const TRIES = 60;
+const RANGES = ['landmark', 'turns', 'wide', 'moderate'] as const;
 
 /**
  * Points of the domain, drawn from a seed: variables in their domains, requirements met. The first points are moderate
@@ -52,23 +53,37 @@ export class SamplePoints {
 
   private value(variable: Variable, v: number, k: number, shrink: number): number {
     const unit = this.random.unit();
-    const wide = k >= 6 && k % 3 === 2;
+    const range = this.rangeOf(k);
     if (variable.domain === 'between' && Number.isFinite(variable.low) && Number.isFinite(variable.high)) {
-      const share = Math.round((0.06 + 0.88 * unit) * 100) / 100;
+      const share = range === 'moderate' ? Math.round((0.06 + 0.88 * unit) * 100) / 100 : unit;
       return variable.low + (variable.high - variable.low) * share;
     }
-    if (variable.domain === 'integer') return Math.floor(unit * (wide ? 40 : 9)) - (wide ? 20 : 4);
-    const scale = wide ? 10 ** (6 * this.random.unit() - 3) : 1;
-    let size = Math.round((0.31 + 2.4 * unit) * 100) / 100;
-    const landmark = k >= 6 && k % 3 === 1 ? this.landmark(k, v) : 0;
-    if (landmark > 0) size = landmark * (0.7 + 0.1 * unit + (this.random.next() & 1 ? 0.6 : 0));
-    else size *= scale;
+    if (variable.domain === 'integer') {
+      return range === 'wide' ? Math.floor(unit * 40) - 20 : Math.floor(unit * 9) - 4;
+    }
+    const moderate = Math.round((0.31 + 2.4 * unit) * 100) / 100;
+    let size = moderate;
+    if (range === 'turns') size = Math.round(2000 * unit) / 100 + 0.01;
+    else if (range === 'wide') size = moderate * 10 ** (6 * this.random.unit() - 3);
+    else if (range === 'landmark') {
+      const landmark = this.landmark(k, v);
+      if (landmark > 0) size = landmark * (0.7 + 0.1 * unit + (this.random.next() & 1 ? 0.6 : 0));
+    }
     if (variable.name !== 'hbar') size *= shrink;
     const low = Number.isFinite(variable.low) ? variable.low : null;
     const high = Number.isFinite(variable.high) ? variable.high : null;
     if (variable.domain === 'between') return low !== null ? low + size : high !== null ? high - size : size;
     const signed = variable.domain === 'real' || variable.domain === 'nonzero';
     return signed && this.random.next() & 1 ? -size : size;
+  }
+
+  /**
+   * Where the values of the k-th point lie: about 1 at first; then also over a few turns of an angle, over six orders of
+   * magnitude, and on both sides of the numbers of the texts; at last each variable by itself.
+   */
+  private rangeOf(k: number): 'moderate' | 'turns' | 'wide' | 'landmark' {
+    if (k < 6) return 'moderate';
+    return RANGES[k < 30 ? k % 4 : this.random.below(4)]!;
   }
 
   /** Sign of a variable that an assumption determines up to its sign. */
@@ -79,7 +94,7 @@ export class SamplePoints {
   /** A number of the expressions away from 1, so that later points lie on both sides of it; 0 if there is none. */
   private landmark(k: number, v: number): number {
     const sizes = this.graph.numbers.map((n) => Math.abs(toNumber(n))).filter((n) => n > 2.5 || (n < 0.2 && n > 0));
-    const value = sizes[(Math.floor(k / 3) + v) % Math.max(1, sizes.length)] ?? 0;
+    const value = sizes[(Math.floor(k / 4) + v) % Math.max(1, sizes.length)] ?? 0;
     return value < 1e100 ? value : 0;
   }
 

@@ -19,6 +19,14 @@ describe('scalars', () => {
     expect(verdictOf('scalar', 'x - 1/1000', 'abs(x - 1/1000)', { x: 'real' })).toBe('differs');
   });
 
+  it('look over many turns of an angle', () => {
+    for (const y of ['positive', 'real', 'nonnegative'] as const) {
+      expect(verdictOf('scalar', 'sin(y)', '((sin(y))^2)^(1/2)', { y })).toBe('differs');
+      expect(verdictOf('scalar', 'cos(y/2)', 'sqrt((1+cos(y))/2)', { y })).toBe('differs');
+      expect(verdictOf('scalar', 'abs(sin(y))', 'sqrt(sin(y)^2)', { y })).toBe('agrees');
+    }
+  });
+
   it('never agree on decimals alone', () => {
     expect(ask('scalar', '1/sqrt(2)', '0.70710678').slips).toEqual(['rounded-decimal']);
     expect(verdictOf('scalar', 'pi', '355/113')).toBe('differs');
@@ -183,5 +191,15 @@ describe('ambiguous notation', () => {
     const other = ask('scalar', 'e*B/(2*m)', 'eB/2m', symbols);
     expect([other.verdict, other.evidence.reason]).toEqual(['undecided', 'ambiguous notation']);
     expect(verdictOf('scalar', 'e*B/m', 'eB/2m', symbols)).toBe('differs');
+  });
+});
+
+describe('real functions built from complex logarithms', () => {
+  it('have the absolute values and conjugates of real numbers', () => {
+    expect(verdictOf('scalar', 'abs(atan(x))', 'atan(abs(x))', real)).not.toBe('differs');
+    expect(verdictOf('scalar', 'abs(atan(x))', 'atan(x)', real)).toBe('differs');
+    expect(verdictOf('scalar', 'conj(sqrt(1 + atan(x)^2))', 'sqrt(1 + atan(x)^2)', real)).toBe('agrees');
+    expect(verdictOf('scalar', 'cos(a)', 'cos(abs(a))', real)).toBe('agrees');
+    expect(verdictOf('scalar', 'sin(abs(a) x)/abs(a)', 'sin(a x)/a', real)).toBe('agrees');
   });
 });
