@@ -1,4 +1,5 @@
-import { type Graph, type Node } from '../algebra/graph';
+import { type Graph, type Node, Op } from '../algebra/graph';
+import { nodesUnder } from '../algebra/rebuild';
 import { highPrecisionDifference, type PreciseSides } from './high-precision';
 import { type ModularOutcome, modularTest } from './modular';
 import { NumericPoint } from './numeric';
@@ -45,7 +46,7 @@ export function decideEqual(g: Graph, pairs: readonly Pair[], points: SamplePoin
   const decide = (others: readonly Pair[]): Decision => decideDirectly(g, others, points, seed);
   const proof = sameByExponential(g, open, points, decide) ?? sameOnEverySign(g, open, decide);
   if (proof && proof.bound <= ERROR_BOUND) return { status: 'equal', test: 'modular and numeric', proof };
-  return preciseWitness(pairs, points) ?? decision;
+  return preciseWitness(g, pairs, open, points) ?? decision;
 }
 
 function decideDirectly(g: Graph, pairs: readonly Pair[], points: SamplePoints, seed: number): Decision {
@@ -63,28 +64,34 @@ function decideDirectly(g: Graph, pairs: readonly Pair[], points: SamplePoints, 
     if (search.usable === 0) return { status: 'undecided', reason: NO_POINT };
     return { status: 'equal', test: 'modular', proof: { ...proofOf(outcome), points: search.usable } };
   }
-  const many = outcome.status === 'branches' ? BRANCH_POINTS : SEARCH_POINTS;
+  // A constant has the same value at every point.
+  const constant = isConstant(g, open);
+  const many = constant ? 1 : outcome.status === 'branches' ? BRANCH_POINTS : SEARCH_POINTS;
   const found = search.upTo(many, many);
   if (found) return found;
-  if (outcome.status === 'branches') return settleBranches(open, outcome, points, search.usable);
+  if (outcome.status === 'branches') return settleBranches(open, outcome, points, search.usable, many);
   const reason =
     outcome.status === 'failed' ? outcome.reason : 'the exact test and the numeric values do not settle it';
   return { status: 'undecided', reason };
 }
 
 /** A witness that only many figures show. */
-function preciseWitness(pairs: readonly Pair[], points: SamplePoints): Decision | null {
-  for (let k = 0, tried = 0; k < SEARCH_POINTS && tried < 2; k++) {
+function preciseWitness(g: Graph, all: readonly Pair[], pairs: readonly Pair[], points: SamplePoints): Decision | null {
+  const enough = isConstant(g, pairs) ? 1 : 2;
+  for (let k = 0, tried = 0; k < SEARCH_POINTS && tried < enough; k++) {
     const point = points.at(k);
     if (!point) continue;
     tried++;
-    for (const [j, [x, y]] of pairs.entries()) {
-      const precise = x === y ? null : highPrecisionDifference(point, x, y);
-      if (precise) return { status: 'different', point, pair: j, precise };
+    for (const [x, y] of pairs) {
+      const precise = highPrecisionDifference(point, x, y);
+      if (precise) return { status: 'different', point, pair: all.findIndex((p) => p[0] === x && p[1] === y), precise };
     }
   }
   return null;
 }
+
+const isConstant = (g: Graph, pairs: readonly Pair[]): boolean =>
+  nodesUnder(g, pairs.flat()).every((node) => g.op[node] !== Op.Symbol);
 
 const proofOf = (o: Extract<ModularOutcome, { bound: number }>): Omit<Proof, 'points'> => ({
   bound: o.bound,
@@ -144,12 +151,13 @@ function settleBranches(
   outcome: Extract<ModularOutcome, { status: 'branches' }>,
   points: SamplePoints,
   usable: number,
+  many: number,
 ): Decision {
   let settled = 0;
   const patterns = 2 ** outcome.kernels.length;
   const flips = Array.from({ length: patterns }, (_, p) => new Set(outcome.kernels.filter((_, j) => (p >> j) & 1)));
   let branch: NumericPoint | null = null;
-  for (let k = 0; k < BRANCH_POINTS; k++) {
+  for (let k = 0; k < many; k++) {
     const point = points.at(k);
     if (!point) continue;
     const principal = differingPair(pairs, point);
@@ -165,7 +173,7 @@ function settleBranches(
     }
     if (clear && vanishing === outcome.vanishing) settled++;
   }
-  if (settled >= BRANCH_POINTS / 3) {
+  if (settled >= many / 3) {
     return { status: 'equal', test: 'modular and numeric', proof: { ...proofOf(outcome), points: usable } };
   }
   return { status: 'undecided', reason: 'the branches of the roots could not be told apart' };

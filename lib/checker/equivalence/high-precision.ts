@@ -19,10 +19,14 @@ import {
 } from './complex-decimal';
 import { type NumericPoint } from './numeric';
 
-/** Figures carried in the two evaluations; what is rounding in one changes in the other. */
-const PRECISIONS = [100, 130] as const;
-/** Agreement to this many figures of the largest value met is no difference. */
-const TRUSTED_FIGURES = 80;
+/**
+ * Figures carried in two evaluations, as what is rounding in one changes in the other, and the figures that are then
+ * trusted: agreement to so many of the largest value met is no difference. The second stage is for what passes the first.
+ */
+const STAGES = [
+  { precisions: [50, 64], trusted: 38 },
+  { precisions: [100, 130], trusted: 80 },
+] as const;
 /** Steps charged to the work limit for one node. */
 const STEP_COST = 4000;
 /** An imaginary part this small beside a negative real one leaves the side of a branch cut open. */
@@ -33,16 +37,30 @@ const ON_CUT = 1e-40;
  * same amount at two precisions.
  */
 export function highPrecisionDifference(point: NumericPoint, x: Node, y: Node): PreciseSides | null {
+  for (const { precisions, trusted } of STAGES) {
+    const sides = differenceAt(point, x, y, precisions, trusted);
+    if (sides) return sides;
+  }
+  return null;
+}
+
+function differenceAt(
+  point: NumericPoint,
+  x: Node,
+  y: Node,
+  precisions: readonly number[],
+  trusted: number,
+): PreciseSides | null {
   const distances: Real[] = [];
   let sides: PreciseSides | null = null;
-  for (const precision of PRECISIONS) {
+  for (const precision of precisions) {
     D.set({ precision });
     const evaluation = new HighPrecision(point.graph, point.values);
     const left = evaluation.value(x);
     const right = evaluation.value(y);
     if (!left || !right) return null;
     const distance = size({ re: left.re.minus(right.re), im: left.im.minus(right.im) });
-    if (!distance.greaterThan(evaluation.largest.times(new D(10).pow(-TRUSTED_FIGURES)))) return null;
+    if (!distance.greaterThan(evaluation.largest.times(new D(10).pow(-trusted)))) return null;
     distances.push(distance);
     sides = { reference: show(left, distance), answer: show(right, distance) };
   }

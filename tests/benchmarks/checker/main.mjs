@@ -13,7 +13,9 @@ const folder = new URL('../../corpus/equivalence/', import.meta.url).pathname;
 /** Runs one task of bench-thread in a thread of its own. */
 function run(task) {
   return new Promise((resolve, reject) => {
-    const worker = new Worker(code, { eval: true, workerData: { folder, ...task } });
+    // As scripts/checks/check-workers runs the checker.
+    const resourceLimits = { maxYoungGenerationSizeMb: 64 };
+    const worker = new Worker(code, { eval: true, workerData: { folder, ...task }, resourceLimits });
     worker.once('message', resolve);
     worker.once('error', reject);
   });
