@@ -3,6 +3,10 @@ import { isInteger, toNumber } from '../algebra/rational';
 
 /** Unit roundoff with room for the library's elementary functions, which are within a few units in the last place. */
 const U = 2.3e-16;
+/** More than what underflow takes from a product, a power or an exponential. */
+const TINY = 1e-305;
+/** The inverse of more than this is not told from zero. */
+const HUGE = 1e300;
 /** Room for nodes that are built after a point: then it need not be enlarged. */
 const SPARE_NODES = 128;
 
@@ -95,13 +99,13 @@ export class NumericPoint {
         const error = this.error[a]!;
         const y = this.im[a]!;
         const re = y === 0 ? size : size * Math.cos(y);
-        this.set(node, re, y === 0 ? 0 : size * Math.sin(y), size * (growth(error) + 4 * U));
+        this.set(node, re, y === 0 ? 0 : size * Math.sin(y), size * (growth(error) + 4 * U) + TINY);
         break;
       }
       case Op.Ln: {
         const x = this.re[a]!;
         const y = this.im[a]!;
-        const size = Math.sqrt(x * x + y * y);
+        const size = modulus(x, y);
         const error = this.error[a]!;
         const trusted = error < size / 4 && (y === 0 || x > 0 || Math.abs(y) > error || g.has(a, Flag.Real));
         const re = Math.log(size);
@@ -153,12 +157,12 @@ export class NumericPoint {
     const eb = this.error[b]!;
     if (ai === 0 && bi === 0) {
       const re = ar * br;
-      this.set(node, re, 0, Math.abs(ar) * eb + Math.abs(br) * ea + ea * eb + U * Math.abs(re));
+      this.set(node, re, 0, Math.abs(ar) * eb + Math.abs(br) * ea + ea * eb + U * Math.abs(re) + TINY);
       return;
     }
     const sizeA = Math.abs(ar) + Math.abs(ai);
     const sizeB = Math.abs(br) + Math.abs(bi);
-    const error = sizeA * eb + sizeB * ea + ea * eb + 2 * U * sizeA * sizeB;
+    const error = sizeA * eb + sizeB * ea + ea * eb + 2 * U * sizeA * sizeB + TINY;
     this.set(node, ar * br - ai * bi, ar * bi + ai * br, error);
   }
 
@@ -167,18 +171,17 @@ export class NumericPoint {
     let im = this.im[a]!;
     let error = this.error[a]!;
     if (n < 0) {
-      const square = re * re + im * im;
-      const size = Math.sqrt(square);
-      if (!(size > 2 * error)) {
+      const size = modulus(re, im);
+      if (!(size > 2 * error) || size > HUGE) {
         this.set(node, NaN, NaN, NaN);
         return;
       }
-      re = re / square;
-      im = -im / square;
+      re = re / size / size;
+      im = -im / size / size;
       error = error / (size * (size - error)) + (4 * U) / size;
       n = -n;
     }
-    const size = Math.sqrt(re * re + im * im);
+    const size = modulus(re, im);
     const relative = error / size;
     let pr = 1;
     let pi = 0;
@@ -195,13 +198,13 @@ export class NumericPoint {
       br = next;
     }
     const bound = size === 0 ? error ** n : size ** n * (Math.expm1(n * Math.log1p(relative)) + 3 * n * U);
-    this.set(node, pr, pi, bound);
+    this.set(node, pr, pi, bound + TINY);
   }
 
   private root(node: Node, a: Node, q: number): void {
     const x = this.re[a]!;
     const y = this.im[a]!;
-    const size = Math.sqrt(x * x + y * y);
+    const size = modulus(x, y);
     const error = this.error[a]!;
     if (size <= 4 * error) {
       // Near zero the root's error is that of the radicand to the power 1/q.
@@ -229,6 +232,13 @@ export class NumericPoint {
     this.im = grow(this.im);
     this.error = grow(this.error);
   }
+}
+
+/** √(x² + y²) without overflow or underflow on the way. */
+function modulus(x: number, y: number): number {
+  if (y === 0) return Math.abs(x);
+  const size = Math.sqrt(x * x + y * y);
+  return size > 1e-150 && size < 1e150 ? size : Math.hypot(x, y);
 }
 
 /** e^x − 1 for a small bound, huge for a large one. */
