@@ -1,4 +1,3 @@
-import { z } from 'zod';
 import { canChangeMembership } from '@/lib/policies/can-change-membership';
 import { requireAllowed } from '@/lib/policies/decide';
 import { courseForActor } from '@/lib/queries/course-for-actor';
