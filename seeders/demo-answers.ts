@@ -132,7 +132,7 @@ function precessionForms(part: string, n: number): AnswerForms {
         right: [
           `(e^(-i ${n} omega t/2), e^(i ${n} omega t/2))/sqrt(2)`,
           `(|+> + e^{i ${n} ω t} |->)/√2`,
-          `\\frac{1}{\\sqrt2}\\left(e^{-i${n}\\omega t/2}\\ket{+} + e^{i${n}\\omega t/2}\\ket{-}\\right)`,
+          `\\frac{1}{\\sqrt2}\\left(e^{-${n}i\\omega t/2}\\ket{+} + e^{${n}i\\omega t/2}\\ket{-}\\right)`,
           `1/sqrt(2) [exp(-i*${n}*omega*t/2), exp(i*${n}*omega*t/2)]`,
         ],
         slips: [
