@@ -16,6 +16,8 @@ const config = {
   poweredByHeader: false,
   // `forbidden()` and its page, so that a refusal is a 403 and not a page of its own making.
   experimental: { authInterrupts: true },
+  // `next dev` is met at the same address as the built pages.
+  allowedDevOrigins: ['127.0.0.1'],
   serverExternalPackages: ['sequelize', 'graphile-worker', 'piscina', 'pino', '@node-rs/argon2'],
   distDir: process.env.HALFMARK_DIST_DIR ?? '.next',
   headers: () => Promise.resolve([{ source: '/:path*', headers: securityHeaders }]),
