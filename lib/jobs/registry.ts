@@ -1,6 +1,7 @@
 import { checkAnswers } from './check-answers';
 import { closeDueSets } from './close-due-sets';
 import { commitIntake } from './commit-intake';
+import { doubtDeliveries } from './doubt-deliveries';
 import { expireLeases } from './expire-leases';
 import { type JobHandlers } from './job-handler';
 import { parseIntake } from './parse-intake';
@@ -14,6 +15,7 @@ export const jobHandlers: JobHandlers = {
   'check-answers': checkAnswers,
   'close-due-sets': closeDueSets,
   'commit-intake': commitIntake,
+  'doubt-deliveries': doubtDeliveries,
   'expire-leases': expireLeases,
   'parse-intake': parseIntake,
   'send-account-mail': sendAccountMail,
@@ -24,4 +26,5 @@ export const jobHandlers: JobHandlers = {
 export const recurringJobs = [
   { name: 'expire-leases', at: '* * * * *' },
   { name: 'close-due-sets', at: '* * * * *' },
+  { name: 'doubt-deliveries', at: '* * * * *' },
 ] as const;

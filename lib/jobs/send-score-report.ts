@@ -1,8 +1,9 @@
+import { type SendMailOptions } from 'nodemailer';
 import { environment } from '@/lib/env';
 import { scoreReportMail } from '@/lib/mail/score-report';
-import { handOff, type HandOffMail } from '@/lib/mail/transport';
+import { handOff, type HandOff, type HandOffMail } from '@/lib/mail/transport';
 import { absolute, paths } from '@/lib/paths';
-import { claimDelivery, settleDelivery } from '@/lib/services/hand-over-delivery';
+import { claimDelivery, settleDelivery, type ClaimedDelivery } from '@/lib/services/hand-over-delivery';
 import type { JobHandler, JobRun } from './job-handler';
 
 /**
@@ -20,19 +21,27 @@ export async function sendScoreReportBy(
 ): Promise<void> {
   const claimed = await claimDelivery(deliveryId, new Date());
   if (claimed === null) return;
-  const { appUrl } = environment();
-  const result = await send({
-    ...scoreReportMail({
-      content: claimed.content,
-      revision: claimed.revision,
-      reason: claimed.reason,
-      link: absolute(appUrl, paths.workReport(claimed.problemSetId)),
-    }),
-    to: { name: claimed.name, address: claimed.email },
-    messageId: claimed.messageId,
-  });
-  await settleDelivery(deliveryId, result, new Date(), { mayRetry: !run.isLastAttempt });
+  const settle = (result: HandOff, mayRetry: boolean) =>
+    settleDelivery(deliveryId, claimed.attempt, result, new Date(), { mayRetry });
+  let message: SendMailOptions;
+  try {
+    message = messageOf(claimed);
+  } catch (error) {
+    await settle({ outcome: 'refused', forNow: false, reason: 'the letter could not be written' }, false);
+    throw error;
+  }
+  const result = await send(message);
+  await settle(result, !run.isLastAttempt);
   if (result.outcome === 'refused' && result.forNow && !run.isLastAttempt) {
     throw new Error(`The mail server would not take a report for now: ${result.reason}.`);
   }
+}
+
+function messageOf({ content, revision, reason, problemSetId, ...claimed }: ClaimedDelivery): SendMailOptions {
+  const link = absolute(environment().appUrl, paths.workReport(problemSetId));
+  return {
+    ...scoreReportMail({ content, revision, reason, link }),
+    to: { name: claimed.name, address: claimed.email },
+    messageId: claimed.messageId,
+  };
 }

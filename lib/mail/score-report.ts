@@ -1,6 +1,12 @@
 import { formatCredit } from '@/lib/domain/credit';
 import { verdictSigns } from '@/lib/domain/verdict';
-import { changeInWords } from '@/lib/presenters/report-words';
+import {
+  appealInWords,
+  appealRuleInWords,
+  changeInWords,
+  reportCaution,
+  slipAsSentence,
+} from '@/lib/presenters/report-words';
 import type { ReportedItem, ReportedPart, ScoreReportContent } from '@/lib/presenters/score-report';
 import { renderLetter, type LetterPart, type RenderedLetter } from './letter';
 
@@ -91,12 +97,13 @@ function markedLine({ verdict, credit }: ReportedPart, outOf: string): string {
   return `${found}${formatCredit(credit)} of ${outOf} marks.`;
 }
 
-function remarks({ slip, followThrough, comment, markedBy }: ReportedPart): LetterPart[] {
+function remarks({ slip, followThrough, comment, appeal, markedBy }: ReportedPart): LetterPart[] {
   return [
-    ...(slip === null ? [] : [{ kind: 'paragraph' as const, text: slip }]),
+    ...(slip === null ? [] : [{ kind: 'paragraph' as const, text: slipAsSentence(slip) }]),
     ...(followThrough
       ? [{ kind: 'paragraph' as const, text: 'Right given your own earlier answer, which this part builds on.' }]
       : []),
+    ...(appeal ? [{ kind: 'paragraph' as const, text: appealInWords(appeal) }] : []),
     ...(comment === '' ? [] : [{ kind: 'markdown' as const, label: 'The grader’s comment', source: comment }]),
     ...(markedBy === 'checker' ? [{ kind: 'note' as const, text: 'Marked by the checker.' }] : []),
   ];
@@ -104,25 +111,16 @@ function remarks({ slip, followThrough, comment, markedBy }: ReportedPart): Lett
 
 function closing({ course, appeals }: ScoreReportContent): LetterPart[] {
   const until = appeals.until === null ? '' : ` until ${momentIn(course.timeZone, appeals.until)}`;
-  const lower = appeals.mayLower
-    ? 'An appeal may raise, keep or lower the credit.'
-    : 'An appeal may raise the credit or keep it; it does not lower it.';
   return [
     { kind: 'heading', text: 'If you think a part is marked wrongly' },
     {
       kind: 'paragraph',
-      text: `You can appeal each part once on the report’s page${until}; say why, and a person looks at it again. ${lower}`,
+      text: `You can appeal each part once on the report’s page${until}; say why, and a person looks at it again. ${appealRuleInWords(appeals.mayLower)}`,
     },
     ...(course.notice.trim() === ''
       ? []
       : [{ kind: 'markdown' as const, label: 'A notice from your course', source: course.notice }]),
-    {
-      kind: 'note',
-      text:
-        'A verdict of the checker is advice until your course’s policy or a person makes it a mark; you can always ask ' +
-        'for a person. The rules of your course and institution on grading, appeals, accommodations, academic ' +
-        'integrity and student records govern.',
-    },
+    { kind: 'note', text: reportCaution },
   ];
 }
 

@@ -18,13 +18,11 @@ export type HandOffMail = (message: SendMailOptions) => Promise<HandOff>;
 
 /**
  * Hands one message to the mail server that SMTP_URL names (in `npm start` without SMTP_URL: the local sink) and tells
- * what became of it; it does not throw for what a server or a network does. The sender is MAIL_FROM unless given.
- *
- * @throws Error where no mail server is set
+ * what became of it; it does not throw for what a server or a network does, nor where no server is set. The sender is MAIL_FROM unless given.
  */
 export const handOff: HandOffMail = async (message) => {
   const { smtpUrl, mailFrom } = environment();
-  if (smtpUrl === null) throw new Error('No mail can be sent: SMTP_URL is not set.');
+  if (smtpUrl === null) return { outcome: 'refused', forNow: true, reason: 'no mail server is set (SMTP_URL)' };
   return handOffTo(smtpUrl, { from: mailFrom, ...message });
 };
 

@@ -23,6 +23,11 @@ export type ReportedPart = {
   comment: string;
   markedBy: 'checker' | 'person' | null;
   followThrough: boolean;
+  /**
+   * What came of an appeal that has been answered; null for none. `sameGrader` where it was answered by who marked the
+   * part before, for want of another grader. The reply is the comment.
+   */
+  appeal: { outcome: 'upheld' | 'kept' | 'lowered'; sameGrader: boolean } | null;
   /** The answer that an appeal would be about; null without one. */
   answerId: string | null;
 };

@@ -1,6 +1,7 @@
 import { QueryTypes, type Transaction } from 'sequelize';
 import { database } from '@/lib/db/connection';
 import type { Verdict } from '@/lib/domain/verdict';
+import type { AppealOutcome } from '@/models/appeal';
 import type { DrawnValues, TemplateContent } from '@/lib/templates/content';
 
 /** A question of a set as one student has it; `values` is null where the student never opened it. */
@@ -26,6 +27,10 @@ export type ReportAnswerRow = {
   credit: number | null;
   creditSource: string | null;
   comment: string | null;
+  /** What came of the appeal of this answer, once it is answered. */
+  appealOutcome: AppealOutcome | null;
+  /** The appeal was answered by who marked the part before, for want of another grader. */
+  sameGrader: boolean;
   /** Whether the checker or a person has yet to decide. */
   waits: boolean;
 };
@@ -57,6 +62,7 @@ export async function reportAnswers(
     `select a.id as "answerId", a.draw_id as "drawId", a.part_key as "partKey", a.text,
             c.verdict, c.slip, c.reading_latex as "readingLatex", c.reading_plain as "readingPlain",
             e.credit, e.source as "creditSource", r.comment,
+            p.outcome as "appealOutcome", coalesce(p.same_grader_noted, false) as "sameGrader",
             (a.check_state <> 'checked' or e.id is null or exists (
                select from queue_items q
                 where q.answer_id = a.id and q.kind = 'review'
@@ -67,6 +73,10 @@ export async function reportAnswers(
        left join answer_checks c on c.id = a.current_check_id
        left join credit_entries e on e.id = a.current_credit_entry_id
        left join rulings r on r.id = e.ruling_id
+       left join lateral (
+         select outcome, same_grader_noted from appeals
+          where answer_id = a.id and state = 'answered'
+          order by answered_at desc limit 1) p on true
       where i.problem_set_id = :problemSetId and d.user_id = :userId and a.superseded_at is null`,
     { type: QueryTypes.SELECT, transaction, replacements: { problemSetId, userId } },
   );

@@ -24,6 +24,8 @@ export const jobSchemas = {
   'expire-leases': fromTheClock,
   /** Closes the sets whose closing time has passed. */
   'close-due-sets': fromTheClock,
+  /** Puts reports whose hand-over was cut short before a person. */
+  'doubt-deliveries': fromTheClock,
 } as const satisfies Record<string, z.ZodType<object>>;
 
 export type JobName = keyof typeof jobSchemas;

@@ -1,3 +1,4 @@
+import { Op } from 'sequelize';
 import { z } from 'zod';
 import { Answer } from '@/models/answer';
 import { AnswerCheck } from '@/models/answer-check';
@@ -5,8 +6,10 @@ import { Appeal } from '@/models/appeal';
 import { Draw } from '@/models/draw';
 import { ProblemSet } from '@/models/problem-set';
 import { ProblemSetItem } from '@/models/problem-set-item';
+import { QueueItem } from '@/models/queue-item';
 import { SetRelease } from '@/models/set-release';
 import { isConstraintViolation } from '@/lib/db/constraints';
+import { liveQueueItemStates } from '@/lib/domain/queue-item-state';
 import { HalfmarkError } from '@/lib/errors';
 import { decide, requireAllowed, requirePerson } from '@/lib/policies/decide';
 import { courseForActor } from '@/lib/queries/course-for-actor';
@@ -38,7 +41,7 @@ export async function openAppeal(
   requireAllowed(decide(actor, 'appeal-own-part', course));
   const release = await SetRelease.findOne({ where: { problemSetId: set.id, userId: student.userId }, transaction });
   if (!release) throw new HalfmarkError('wrong-state', 'Your scores are not out yet, so there is nothing to appeal.');
-  if (answer.supersededAt !== null || answer.currentCreditEntryId === null) {
+  if (await isStillMarked(context, answer)) {
     throw new HalfmarkError('wrong-state', 'This part is still being marked, so there is nothing to appeal yet.');
   }
   if (set.appealsUntil !== null && now >= set.appealsUntil) {
@@ -72,6 +75,16 @@ export async function openAppeal(
     subject: { kind: 'appeal', id: appeal.id },
   });
   return { appealId: appeal.id };
+}
+
+/** Whether the part waits for the checker or a person, also again after a ruling was taken back. */
+async function isStillMarked({ transaction }: ServiceContext, answer: Answer): Promise<boolean> {
+  if (answer.supersededAt !== null || answer.currentCreditEntryId === null) return true;
+  const waiting = await QueueItem.count({
+    where: { answerId: answer.id, kind: 'review', state: { [Op.in]: [...liveQueueItemStates, 'to-settle'] } },
+    transaction,
+  });
+  return waiting > 0;
 }
 
 async function createOnce(

@@ -11,6 +11,7 @@ import { decideMarking, type SlipCredit } from '@/lib/domain/decide-marking';
 import { setPolicySchema } from '@/lib/domain/set-policy';
 import { HalfmarkError } from '@/lib/errors';
 import { pointsOfPart } from '@/lib/templates/points-of-part';
+import { reissueIfReleased } from './compose-score-report';
 import type { ServiceContext } from './context';
 import { giveCredit } from './give-credit';
 import { openQueueItem } from './open-queue-item';
@@ -52,14 +53,14 @@ export async function recordCheck(context: ServiceContext, record: CheckRecord):
   return isNew;
 }
 
-type Place = { set: ProblemSet; item: ProblemSetItem; version: TemplateVersion };
+type Place = { set: ProblemSet; item: ProblemSetItem; version: TemplateVersion; studentId: string };
 
 async function placeOf({ transaction }: ServiceContext, answer: Answer): Promise<Place> {
   const draw = await Draw.findByPk(answer.drawId, { transaction, rejectOnEmpty: true });
   const version = await TemplateVersion.findByPk(draw.templateVersionId, { transaction, rejectOnEmpty: true });
   const item = await ProblemSetItem.findByPk(draw.itemId, { transaction, rejectOnEmpty: true });
   const set = await ProblemSet.findByPk(item.problemSetId, { transaction, rejectOnEmpty: true });
-  return { set, item, version };
+  return { set, item, version, studentId: draw.userId };
 }
 
 function storedForm(answerId: string, templateVersionId: string, record: CheckRecord) {
@@ -108,6 +109,11 @@ async function mark(context: ServiceContext, answer: Answer, place: Place, respo
       outOf,
       source: decision.rule === null ? 'automatic' : 'rule',
       reason: decision.rule ?? response.verdict,
+    });
+    await reissueIfReleased(context, {
+      problemSetId: place.set.id,
+      userId: place.studentId,
+      reason: 'A part that was still being marked has been marked.',
     });
     return;
   }
