@@ -32,7 +32,13 @@ export async function writeQuestion(instructor: Person, url: string): Promise<vo
   await symbol.getByLabel('Name').fill('Omega');
   await symbol.getByLabel('Is').selectOption({ label: 'positive' });
 
-  await writePart(page, 'a', 'Work out $[{{n}} A, B]$ for $A = {{A}}$.', 'Operator', 'commutator(n*A, S_x + S_y + S_z)');
+  await writePart(
+    page,
+    'a',
+    'Work out $[{{n}} A, B]$ for $A = {{A}}$.',
+    'Operator',
+    'commutator(n*A, S_x + S_y + S_z)',
+  );
   await page.getByRole('button', { name: 'Add part b' }).click();
   await writePart(page, 'b', 'Find the energies.', 'Eigenvalues', 'eigenvalues(n*Omega*A)');
   await page.getByRole('button', { name: 'Add part c' }).click();
@@ -43,7 +49,10 @@ export async function writeQuestion(instructor: Person, url: string): Promise<vo
   await page.getByRole('region', { name: 'Draw 3' }).getByText('Reference').first().waitFor();
   await instructor.inspect('template editor');
   await page.getByRole('button', { name: 'Publish version 1…' }).click();
-  await page.getByRole('dialog').getByRole('button', { name: /^Publish/ }).click();
+  await page
+    .getByRole('dialog')
+    .getByRole('button', { name: /^Publish/ })
+    .click();
   await page.getByRole('region', { name: 'Versions' }).getByText('Version 1').first().waitFor();
 }
 
