@@ -23,6 +23,7 @@ import type { SeededRandom } from '@/lib/templates/seeded-random';
 import { answerForms, type AnswerForms } from './demo-answers';
 import { newClientKey, type DemoPeople } from './demo-people';
 import { demoTemplates, type DemoTemplateId } from './demo-templates';
+import { shelfTemplates, type ShelfTemplate } from './demo-shelf';
 
 const MINUTE = 60_000;
 
@@ -39,24 +40,31 @@ export async function as<Result>(
   });
 }
 
-/** Puts the demo's questions on the shelf and publishes each; gives the version by the question's id. */
+/** Puts the demo's questions on the shelf and publishes each; gives the versions of those that its sets use. */
 export async function publishTemplates(people: DemoPeople, at: Date): Promise<Map<DemoTemplateId, string>> {
   const versions = new Map<DemoTemplateId, string>();
-  for (const { id, topics, content } of demoTemplates) {
-    const { templateId, revision } = await as(people.instructor, at, (context) =>
-      createTemplate(context, {
-        departmentId: people.course.departmentId,
-        name: content.title,
-        topics,
-        draft: draftOfContent(content),
-      }),
-    );
-    const { versionId } = await as(people.instructor, at, (context) =>
-      publishTemplateVersion(context, { templateId, revision }),
-    );
-    versions.set(id, versionId);
-  }
+  for (const template of demoTemplates) versions.set(template.id, await publish(people, at, template));
+  for (const template of shelfTemplates()) await publish(people, at, template);
   return versions;
+}
+
+async function publish(
+  people: DemoPeople,
+  at: Date,
+  { topics, content }: Pick<ShelfTemplate, 'topics' | 'content'>,
+): Promise<string> {
+  const { templateId, revision } = await as(people.instructor, at, (context) =>
+    createTemplate(context, {
+      departmentId: people.course.departmentId,
+      name: content.title,
+      topics,
+      draft: draftOfContent(content),
+    }),
+  );
+  const { versionId } = await as(people.instructor, at, (context) =>
+    publishTemplateVersion(context, { templateId, revision }),
+  );
+  return versionId;
 }
 
 /** A set of the demo with the questions in it, in order. */
