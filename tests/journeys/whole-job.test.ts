@@ -39,13 +39,12 @@ afterAll(async () => {
 });
 
 describe('from template to corrected report', { timeout: 120_000 }, () => {
-  let setUrl: string;
   let draw: OwnDraw;
 
   it('an instructor writes a question, proves it on three draws, publishes and sets it', async () => {
     const instructor = await at('Maren Tollgate');
     await writeQuestion(instructor, halfmark.url);
-    setUrl = await openSet(instructor, title);
+    await openSet(instructor, title);
   });
 
   it('a student answers their own draw, with live reading, a receipt and a second attempt', async () => {
