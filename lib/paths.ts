@@ -27,6 +27,7 @@ export const paths = {
     `/courses/${courseId}/sets/${setId}/desk/${queueItemId}`,
   release: (courseId: string, setId: string) => `/courses/${courseId}/sets/${setId}/release`,
   deliveries: (courseId: string, setId: string) => `/courses/${courseId}/sets/${setId}/deliveries`,
+  deliveriesApi: (setId: string) => `/api/problem-sets/${setId}/deliveries`,
   reportOf: (courseId: string, setId: string, userId: string) => `/courses/${courseId}/sets/${setId}/reports/${userId}`,
   consistency: (courseId: string, setId: string) => `/courses/${courseId}/sets/${setId}/consistency`,
 

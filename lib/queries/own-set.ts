@@ -16,6 +16,7 @@ export type OwnSet = {
   state: ProblemSetState;
   opensAt: Date | null;
   closesAt: Date | null;
+  appealsUntil: Date | null;
   attemptsAllowed: number;
   policy: SetPolicy;
   course: CourseView;
@@ -47,6 +48,7 @@ export async function ownSet(
     state: set.state,
     opensAt: set.opensAt,
     closesAt: set.closesAt,
+    appealsUntil: set.appealsUntil,
     attemptsAllowed: set.attemptsAllowed,
     policy: setPolicySchema.parse(set.policy),
     course,

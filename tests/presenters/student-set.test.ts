@@ -45,6 +45,7 @@ const set: OwnSet = {
   state: 'open',
   opensAt: new Date('2026-11-20T12:00:00Z'),
   closesAt: new Date('2026-12-04T17:00:00Z'),
+  appealsUntil: null,
   attemptsAllowed: 3,
   policy: defaultSetPolicy,
   course: {

@@ -33,6 +33,7 @@ export default async function SetPage({ params }: Props) {
   });
   const now = new Date();
   const mayEdit = decide(actor, 'edit-problem-sets', course).allowed;
+  const mayRelease = decide(actor, 'release-scores', course).allowed;
   const mayReorder = mayEdit && !hasBegun(set, now);
   const shelf = mayReorder ? await shelfFor(actor) : [];
   return (
@@ -47,7 +48,18 @@ export default async function SetPage({ params }: Props) {
         status={<SetState set={set} zone={course.timeZone} now={now} />}
       />
       <ScriptPage>
-        <Section margin={<SetMargin course={course} set={set} students={students} mayEdit={mayEdit} now={now} />}>
+        <Section
+          margin={
+            <SetMargin
+              course={course}
+              set={set}
+              students={students}
+              mayEdit={mayEdit}
+              mayRelease={mayRelease}
+              now={now}
+            />
+          }
+        >
           <PageTitle kicker={`${course.code} · problem set ${set.number}`}>{set.title}</PageTitle>
           <Plan course={course} set={set} mayEdit={mayEdit} now={now} />
         </Section>

@@ -1,8 +1,10 @@
+import Link from 'next/link';
 import { SetState } from '@/app/(course)/_components/set-state';
 import { TimeStamp } from '@/components/ui/time-stamp';
 import { formatCredit } from '@/lib/domain/credit';
 import { hasBegun } from '@/lib/domain/problem-set-change';
 import { localOf } from '@/lib/domain/zoned-time';
+import { paths } from '@/lib/paths';
 import { type CourseView } from '@/lib/queries/course-for-actor';
 import { type SetForStaff } from '@/lib/queries/set-for-staff';
 import { SetMoves } from './set-moves';
@@ -12,13 +14,14 @@ interface SetMarginProps {
   readonly set: SetForStaff;
   readonly students: number;
   readonly mayEdit: boolean;
+  readonly mayRelease: boolean;
   readonly now: Date;
 }
 
 const day = 86_400_000;
 
 /** The state of a set in its margin: points, who answered, what waits, and the next step. */
-export function SetMargin({ course, set, students, mayEdit, now }: SetMarginProps) {
+export function SetMargin({ course, set, students, mayEdit, mayRelease, now }: SetMarginProps) {
   const begun = hasBegun(set, now);
   return (
     <div className="grid gap-4">
@@ -38,6 +41,13 @@ export function SetMargin({ course, set, students, mayEdit, now }: SetMarginProp
           {set.answeredBy} of {students} students answered
           <br />
           {set.waiting === 0 ? 'nothing waits for a person' : `${set.waiting} waiting for a person`}
+        </p>
+      ) : null}
+      {mayRelease && (set.state === 'closed' || set.state === 'released') ? (
+        <p>
+          <Link href={paths.release(course.id, set.id)}>
+            {set.state === 'closed' ? 'Release the scores' : 'Scores and reports'}
+          </Link>
         </p>
       ) : null}
       {mayEdit ? (
