@@ -25,6 +25,8 @@ export const paths = {
   queue: (courseId: string, setId: string) => `/courses/${courseId}/sets/${setId}/queue`,
   desk: (courseId: string, setId: string, queueItemId: string) =>
     `/courses/${courseId}/sets/${setId}/desk/${queueItemId}`,
+  secondMarking: (courseId: string, setId: string, secondMarkingId: string) =>
+    `/courses/${courseId}/sets/${setId}/desk/second/${secondMarkingId}`,
   settle: (courseId: string, setId: string, secondMarkingId: string) =>
     `/courses/${courseId}/sets/${setId}/queue/settle/${secondMarkingId}`,
   release: (courseId: string, setId: string) => `/courses/${courseId}/sets/${setId}/release`,
