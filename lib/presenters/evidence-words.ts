@@ -1,7 +1,18 @@
 import type { Evidence, Witness } from '@/lib/checker/contract';
 import type { Verdict } from '@/lib/domain/verdict';
 
-const names: Readonly<Record<string, string>> = { hbar: 'ħ' };
+/** Names as they are read; the rest stand as they were declared. */
+const names: Readonly<Record<string, string>> = {
+  hbar: 'ħ',
+  omega: 'ω',
+  Omega: 'Ω',
+  theta: 'θ',
+  phi: 'φ',
+  Delta: 'Δ',
+  epsilon: 'ε',
+  gamma: 'γ',
+  omega_1: 'ω₁',
+};
 
 /**
  * What decided a check, as sentences for those who mark: the exact test with its bound, the witness with both sides, or
@@ -62,10 +73,16 @@ function differing(elements: Evidence['elements']): string {
 }
 
 function witnessInWords({ values, element, reference, answer }: Witness): string {
-  const at = Object.entries(values).map(([name, value]) => `${names[name] ?? name} = ${value}`);
+  const at = Object.entries(values).map(([name, value]) => `${names[name] ?? name} = ${minus(value)}`);
   const where = at.length > 0 ? `At ${at.join(', ')} ` : '';
-  const what = element === '' ? 'the answer' : `the ${element} of the answer`;
-  return `${where}${where === '' ? capital(what) : what} is ${answer}, that of the reference ${reference}.`;
+  const what = element === '' ? 'the answer' : `${element} of the answer`;
+  const sides = `is ${minus(answer)}, that of the reference ${minus(reference)}`;
+  return `${where}${where === '' ? capital(what) : what} ${sides}.`;
+}
+
+/** A true minus sign for the one that programs write. */
+function minus(value: string): string {
+  return value.replaceAll('-', '−');
 }
 
 function toleranceInWords({ tolerance, distance }: Evidence): string {

@@ -64,8 +64,8 @@ const delimiter = String.raw`(?:\\[A-Za-z]+|\\[{}|]|[()[\]|.<>/])`;
 /** First that fits, at the place where the last one ended. A ket or bra with a written label is one character. */
 const rules: readonly (readonly [Token['kind'], RegExp])[] = [
   ['slot', new RegExp(slotPattern.source, 'y')],
-  ['open', new RegExp(String.raw`\\left\s*${delimiter}|\\begin\s*\{[a-zA-Z]+\*?\}(?:\{[clr|]*\})?`, 'y')],
-  ['close', new RegExp(String.raw`\\right\s*${delimiter}|\\end\s*\{[a-zA-Z]+\*?\}`, 'y')],
+  ['open', new RegExp(String.raw`\\(?:left|[bB]igg?l)\s*${delimiter}|\\begin\s*\{[a-zA-Z]+\*?\}(?:\{[clr|]*\})?`, 'y')],
+  ['close', new RegExp(String.raw`\\(?:right|[bB]igg?r)\s*${delimiter}|\\end\s*\{[a-zA-Z]+\*?\}`, 'y')],
   ['character', /\|[^|{}&$]{0,20}?\\rangle(?![A-Za-z])|\\langle\s*[^|{}&$]{0,20}?\|/y],
   ['boundary', /\\\\(?:\[[^\]]*\])?|[&,;:=<>|]|\\(?:[lr]angle|[lr]?[vV]ert)(?![A-Za-z])|\\\|/y],
   ['space', /\\[,;:! ]|\\q?quad(?![A-Za-z])|[\s~]+/y],

@@ -99,6 +99,7 @@ describe('typesetFormula', () => {
 
   it('brackets a sum beside a factor and leaves it alone by itself', () => {
     expect(set('{{s}} \\sigma_z', { s: sum })).toBe('\\left(a - b\\right) \\sigma_z');
+    expect(set('\\tfrac12\\,\\bigl({{s}}\\bigr)', { s: sum })).toBe('\\tfrac12\\,\\bigl(a - b\\bigr)');
     expect(set('x - {{s}}', { s: sum })).toBe('x - \\left(a - b\\right)');
     expect(set('x = {{s}}', { s: sum })).toBe('x = a - b');
   });

@@ -2,6 +2,7 @@ import Link from 'next/link';
 import { setName, SetHead } from '@/app/(course)/_components/course-head';
 import { openCoursePage } from '@/app/_server/course-page';
 import { pageOf } from '@/app/_server/page';
+import { QueryProvider } from '@/components/ui/query-provider';
 import { EmptyState } from '@/components/ui/states';
 import { Notice } from '@/components/ui/notice';
 import { MarginNote, PageTitle, ScriptPage, Section } from '@/components/ui/script-page';
@@ -84,7 +85,9 @@ export default async function QueuePage({ params, searchParams }: Props) {
                 </ul>
               ) : null}
               {named ? null : <MarginNote>Scripts stand without names until the set is released.</MarginNote>}
-              <QueuePulse problemSetId={set.id} stamp={stamp} />
+              <QueryProvider>
+                <QueuePulse problemSetId={set.id} stamp={stamp} />
+              </QueryProvider>
             </div>
           }
         >

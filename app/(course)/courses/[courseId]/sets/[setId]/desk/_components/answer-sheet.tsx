@@ -26,7 +26,7 @@ export function AnswerSheet({ answer, zone }: { answer: MarkedAnswer; zone: stri
         <Markdown source={answer.asked} />
       </div>
       <h2 className="mt-6 mb-2">Reference and answer</h2>
-      <div className="grid border-y border-hairline md:grid-cols-2">
+      <div className="grid border-y border-hairline sm:grid-cols-2">
         <Side words="Reference for this draw">
           {answer.referenceLatex ? <Typeset latex={answer.referenceLatex} display /> : <p>Not worked out.</p>}
         </Side>
@@ -98,7 +98,7 @@ function distinct(sentence: string, index: number, all: readonly string[]): bool
 
 function Side({ words, second = false, children }: { words: string; second?: boolean; children: ReactNode }) {
   return (
-    <div className={`min-w-0 px-4 py-3 ${second ? 'border-hairline max-md:border-t md:border-s' : ''}`}>
+    <div className={`min-w-0 px-4 py-3 ${second ? 'border-hairline max-sm:border-t sm:border-s' : ''}`}>
       <p className="text-small text-grey">{words}</p>
       {children}
     </div>

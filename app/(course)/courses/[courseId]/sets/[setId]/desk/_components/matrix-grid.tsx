@@ -12,26 +12,28 @@ export function MatrixGrid({ elements: { before, rows, behind }, differ }: Matri
   return (
     <div className="flex items-center justify-center gap-1 py-2">
       {before ? <Typeset latex={before} /> : null}
-      <table role="presentation" className="rounded-[0.9rem] border-x-2 border-ink">
-        <tbody>
-          {rows.map((row, at) => (
-            <tr key={at}>
-              {row.map((element, column) => (
-                <td key={column} className="px-2 py-1 text-center">
-                  {differ?.[at]?.[column] ? (
-                    <span className="text-madder underline decoration-2 underline-offset-4">
+      <div className="rounded-[1.1rem] border-x-2 border-ink px-1">
+        <table role="presentation">
+          <tbody>
+            {rows.map((row, at) => (
+              <tr key={at}>
+                {row.map((element, column) => (
+                  <td key={column} className="px-2 py-1 text-center">
+                    {differ?.[at]?.[column] ? (
+                      <span className="border-b-2 border-madder text-madder">
+                        <Typeset latex={element} />
+                        <span className="sr-only"> differs</span>
+                      </span>
+                    ) : (
                       <Typeset latex={element} />
-                      <span className="sr-only"> differs</span>
-                    </span>
-                  ) : (
-                    <Typeset latex={element} />
-                  )}
-                </td>
-              ))}
-            </tr>
-          ))}
-        </tbody>
-      </table>
+                    )}
+                  </td>
+                ))}
+              </tr>
+            ))}
+          </tbody>
+        </table>
+      </div>
       {behind ? <Typeset latex={behind} /> : null}
     </div>
   );
