@@ -6,6 +6,8 @@ export interface AppealStateProps {
     createdAt: Date;
     outcome: 'upheld' | 'kept' | 'lowered' | null;
     answeredAt: Date | null;
+    /** Answered by who marked the part before, for want of another grader. */
+    sameGrader: boolean;
   };
   readonly zone: string;
   /** Whose appeal it is, as the reader is to be told: "You", "The student". */
@@ -24,6 +26,7 @@ export function AppealState({ appeal, zone, who }: AppealStateProps) {
         {appeal.outcome !== null && appeal.answeredAt !== null ? (
           <>
             ; answered on <TimeStamp at={appeal.answeredAt} zone={zone} style="short" />: {outcomes[appeal.outcome]}.
+            {appeal.sameGrader ? ' The course has no other grader, so the person who marked it before answered.' : null}
           </>
         ) : (
           '. A grader will look at it.'

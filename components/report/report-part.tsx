@@ -5,7 +5,7 @@ import { Mark } from '@/components/ui/mark';
 import { PartRow } from '@/components/ui/script-page';
 import { VerdictSign } from '@/components/ui/verdict-sign';
 import { formatCredit } from '@/lib/domain/credit';
-import { appealInWords, slipAsSentence } from '@/lib/presenters/report-words';
+import { slipAsSentence } from '@/lib/presenters/report-words';
 import { type ReportedPart } from '@/lib/presenters/score-report';
 import { Witness, type WitnessProps } from './witness';
 
@@ -14,19 +14,26 @@ interface ReportPartProps {
   readonly position: number;
   readonly part: ReportedPart;
   readonly witness: WitnessProps['witness'] | undefined;
-  /** The appeal of this part, or the way to one. */
+  /** Where an appeal of this part stands. */
   readonly appeal: ReactNode;
+  /** The way to an appeal, under the marks. */
+  readonly appealForm: ReactNode;
 }
 
 /** One part of a report: what was asked, written and read in the body; verdict, credit and the grader's note in the margin. */
-export function ReportPart({ position, part, witness, appeal }: ReportPartProps) {
+export function ReportPart({ position, part, witness, appeal, appealForm }: ReportPartProps) {
   return (
     <PartRow
       id={`question-${position}-${part.key}`}
       letter={part.key}
       label={`Question ${position}, part ${part.key}`}
       prompt={part.prompt === '' ? null : <Markdown source={part.prompt} inline />}
-      margin={<PartMarks part={part} />}
+      margin={
+        <>
+          <PartMarks part={part} />
+          {appealForm}
+        </>
+      }
     >
       <Written part={part} />
       {part.slip === null ? null : <p className="mt-3">{slipAsSentence(part.slip)}</p>}
@@ -58,7 +65,7 @@ function Written({ part }: { part: ReportedPart }) {
 }
 
 function PartMarks({ part }: { part: ReportedPart }) {
-  const { state, verdict, credit, outOf, comment, markedBy, appeal } = part;
+  const { state, verdict, credit, outOf, comment, markedBy } = part;
   if (state === 'waiting') {
     return (
       <Mark credit={null} of={formatCredit(outOf)} state="still being marked">
@@ -74,7 +81,6 @@ function PartMarks({ part }: { part: ReportedPart }) {
         of={formatCredit(outOf)}
         state={state === 'no-answer' ? 'no answer' : undefined}
       >
-        {appeal ? <p>{appealInWords(appeal)}</p> : null}
         {comment === '' ? null : <Markdown source={comment} />}
         {markedBy === null ? null : (
           <p className="mt-1 text-grey">{markedBy === 'checker' ? 'marked by the checker' : 'marked by a person'}</p>

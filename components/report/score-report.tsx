@@ -13,11 +13,13 @@ export interface ScoreReportProps {
   readonly content: ScoreReportContent;
   readonly witnesses: readonly (WitnessProps['witness'] & { answerId: string })[];
   /** What stands under a part about its appeal. */
-  readonly appealOf: (part: ReportedPart, item: ReportedItem) => ReactNode;
+  readonly appealOf: (part: ReportedPart) => ReactNode;
+  /** What stands under its marks: the way to an appeal. */
+  readonly appealFormOf?: (part: ReportedPart, item: ReportedItem) => ReactNode;
 }
 
 /** The questions of a report, part by part, and how to appeal: the same for the student and the staff. */
-export function ScoreReport({ content, witnesses, appealOf }: ScoreReportProps) {
+export function ScoreReport({ content, witnesses, appealOf, appealFormOf }: ScoreReportProps) {
   return (
     <>
       {content.items.map((item) => (
@@ -42,7 +44,8 @@ export function ScoreReport({ content, witnesses, appealOf }: ScoreReportProps) 
                   position={item.position}
                   part={part}
                   witness={witnesses.find(({ answerId }) => answerId === part.answerId && part.state === 'marked')}
-                  appeal={appealOf(part, item)}
+                  appeal={appealOf(part)}
+                  appealForm={appealFormOf?.(part, item)}
                 />
               ))}
         </Fragment>
@@ -105,7 +108,7 @@ function HowToAppeal({ content: { course, appeals } }: Pick<ScoreReportProps, 'c
           <p className="text-small">
             Appeals until
             <br />
-            <TimeStamp at={appeals.until} zone={course.timeZone} />
+            <TimeStamp at={appeals.until} zone={course.timeZone} style="short" />
           </p>
         )
       }

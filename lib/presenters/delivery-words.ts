@@ -2,11 +2,11 @@ import type { DeliveryState } from '@/models/delivery';
 
 /** What became of a report's e-mail, in words. */
 export const deliveryWords: Record<DeliveryState, string> = {
-  waiting: 'waiting to be sent',
-  sending: 'being handed over',
-  sent: 'taken by the mail server',
-  unconfirmed: 'cut short, may have gone out',
-  failed: 'not sent',
+  waiting: 'waiting',
+  sending: 'sending',
+  sent: 'sent',
+  unconfirmed: 'unconfirmed',
+  failed: 'failed',
 };
 
 /** Whether a delivery will go on by itself, so that a page about it looks again. */

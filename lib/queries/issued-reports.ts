@@ -21,6 +21,8 @@ export type OwnAppeal = {
   createdAt: Date;
   outcome: AppealOutcome | null;
   answeredAt: Date | null;
+  /** Answered by who marked the part before, for want of another grader. */
+  sameGrader: boolean;
 };
 
 /** Values at which an answer and its reference differ, as short decimal texts, and where in the answer. */
@@ -50,7 +52,8 @@ export async function issuedReports(whose: WhoseReport, transaction?: Transactio
 /** A student's appeals in a set. */
 export async function appealsOf(whose: WhoseReport, transaction?: Transaction): Promise<OwnAppeal[]> {
   return database().query<OwnAppeal>(
-    `select answer_id as "answerId", reason, created_at as "createdAt", outcome, answered_at as "answeredAt"
+    `select answer_id as "answerId", reason, created_at as "createdAt", outcome, answered_at as "answeredAt",
+            same_grader_noted as "sameGrader"
        from appeals
       where problem_set_id = :problemSetId and user_id = :userId
       order by created_at`,

@@ -11,7 +11,7 @@ import { EmptyState } from '@/components/ui/states';
 import { TimeStamp } from '@/components/ui/time-stamp';
 import { paths } from '@/lib/paths';
 import { ownReport } from '@/lib/queries/own-report';
-import { OwnAppeal } from './_components/own-appeal';
+import { OwnAppeal, WayToAppeal } from './_components/own-appeal';
 
 export const metadata = { title: 'Score report' };
 
@@ -75,7 +75,10 @@ export default async function ReportPage({ params }: Props) {
             <ScoreReport
               content={{ ...latest.content, appeals }}
               witnesses={witnesses}
-              appealOf={(part, item) => <OwnAppeal report={report} part={part} position={item.position} now={now} />}
+              appealOf={(part) => <OwnAppeal report={report} part={part} />}
+              appealFormOf={(part, item) => (
+                <WayToAppeal report={report} part={part} position={item.position} now={now} />
+              )}
             />
           </>
         ) : (

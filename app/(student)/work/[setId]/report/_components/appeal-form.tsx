@@ -28,9 +28,9 @@ export function AppealForm({ problemSetId, answerId, place, rule }: AppealFormPr
     toast('Your appeal is in. You get a corrected report when it is answered.');
   });
   return (
-    <div className="mt-4">
-      <Button look="plain" onClick={() => ask(true)} aria-label={`Appeal ${place}`}>
-        Ask that a person look at this part again
+    <div className="mt-2 text-small">
+      <Button look="plain" onClick={() => ask(true)} aria-label={`Appeal this part: ${place}`}>
+        Appeal this part
       </Button>
       <Dialog open={asking} onClose={() => ask(false)} title={`Appeal ${place}`}>
         <form {...form} className="grid gap-3">

@@ -4,19 +4,19 @@ import { type ReportedPart } from '@/lib/presenters/score-report';
 import { type OwnReport } from '@/lib/queries/own-report';
 import { AppealForm } from './appeal-form';
 
-interface OwnAppealProps {
-  readonly report: OwnReport;
-  readonly part: ReportedPart;
-  readonly position: number;
-  readonly now: Date;
+type Of = { report: OwnReport; part: ReportedPart };
+
+/** Where the student's appeal of a part stands; nothing where none was made. */
+export function OwnAppeal({ report, part }: Of) {
+  const made = madeOf(report, part);
+  return made ? <AppealState appeal={made} zone={report.set.course.timeZone} who="You" /> : null;
 }
 
-/** Under a part: where its appeal stands, or the way to make one while there is time. */
-export function OwnAppeal({ report: { set, appeals }, part, position, now }: OwnAppealProps) {
-  if (part.answerId === null) return null;
-  const made = appeals.findLast(({ answerId }) => answerId === part.answerId);
-  if (made) return <AppealState appeal={made} zone={set.course.timeZone} who="You" />;
-  if (part.state !== 'marked' || (set.appealsUntil !== null && now >= set.appealsUntil)) return null;
+/** The way to an appeal of a marked part, while there is time and none was made. */
+export function WayToAppeal({ report, part, position, now }: Of & { position: number; now: Date }) {
+  const { set } = report;
+  const isOver = set.appealsUntil !== null && now >= set.appealsUntil;
+  if (part.answerId === null || part.state !== 'marked' || isOver || madeOf(report, part)) return null;
   return (
     <AppealForm
       problemSetId={set.id}
@@ -26,3 +26,6 @@ export function OwnAppeal({ report: { set, appeals }, part, position, now }: Own
     />
   );
 }
+
+const madeOf = ({ appeals }: OwnReport, part: ReportedPart) =>
+  appeals.findLast(({ answerId }) => answerId === part.answerId);

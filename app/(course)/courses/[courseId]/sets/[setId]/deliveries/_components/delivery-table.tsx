@@ -1,5 +1,6 @@
 'use client';
 
+import { type ReactNode } from 'react';
 import { ActionButton } from '@/app/_components/action-button';
 import { DataTable, type TableRow } from '@/components/ui/data-table';
 import { formatTime } from '@/components/ui/time-stamp';
@@ -34,18 +35,23 @@ function row(delivery: DeliveryRow, { courseId, problemSetId, zone }: Omit<Deliv
   const { id, userId, student, email, revision, state, attempts, lastError } = delivery;
   // Over the wire a moment is a text.
   const at = new Date(delivery.at);
+  const report = revision === 1 ? 'first' : `corrected, no. ${revision}`;
   return {
     id,
     cells: {
-      student: { value: student, href: paths.reportOf(courseId, problemSetId, userId) },
+      student: {
+        value: student,
+        node: <OneLine>{student}</OneLine>,
+        href: paths.reportOf(courseId, problemSetId, userId),
+      },
       email,
-      report: { value: revision, text: revision === 1 ? 'first' : `corrected, ${revision}` },
+      report: { value: revision, node: <OneLine>{report}</OneLine> },
       state: {
         value: deliveryWords[state],
         text: [deliveryWords[state], lastError].filter(Boolean).join(': '),
         node: <State delivery={delivery} />,
       },
-      at: { value: at.getTime(), text: formatTime(at, zone, 'short') },
+      at: { value: at.getTime(), node: <OneLine>{formatTime(at, zone, 'short')}</OneLine> },
       tries: attempts,
       again: needsPerson(state)
         ? { value: null, node: <Again ids={{ courseId, problemSetId, deliveryId: id }} delivery={delivery} /> }
@@ -54,11 +60,15 @@ function row(delivery: DeliveryRow, { courseId, problemSetId, zone }: Omit<Deliv
   };
 }
 
+function OneLine({ children }: { children: ReactNode }) {
+  return <span className="whitespace-nowrap">{children}</span>;
+}
+
 function State({ delivery: { state, lastError } }: { delivery: DeliveryRow }) {
   return (
     <>
       <span className={needsPerson(state) ? 'font-semibold text-madder' : undefined}>{deliveryWords[state]}</span>
-      {lastError && needsPerson(state) ? <span className="block text-grey">{lastError}</span> : null}
+      {lastError && needsPerson(state) ? <span className="block min-w-48 text-grey">{lastError}</span> : null}
     </>
   );
 }

@@ -3,7 +3,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { Progress } from '@/components/ui/progress';
 import { QueryProvider } from '@/components/ui/query-provider';
-import { isUnderWay } from '@/lib/presenters/delivery-words';
+import { deliveryWords, isUnderWay } from '@/lib/presenters/delivery-words';
 import { paths } from '@/lib/paths';
 import { type DeliveryRow } from '@/lib/queries/deliveries';
 import { DeliveryTable } from './delivery-table';
@@ -39,8 +39,8 @@ function Live({ courseId, problemSetId, zone, rows }: LiveDeliveriesProps) {
   });
   const underWay = data.filter(({ state }) => isUnderWay(state)).length;
   return (
-    <div className="grid gap-5">
-      <div role="status">
+    <>
+      <div role="status" className="mb-4 max-w-measure">
         {underWay === 0 ? null : (
           <Progress
             label="Sending"
@@ -55,9 +55,18 @@ function Live({ courseId, problemSetId, zone, rows }: LiveDeliveriesProps) {
           </p>
         ) : null}
       </div>
+      <p className="mb-4 font-semibold">{countsInWords(data)}</p>
       <DeliveryTable courseId={courseId} problemSetId={problemSetId} zone={zone} rows={data} />
-    </div>
+    </>
   );
+}
+
+/** "58 sent, 1 failed": how many there are in each state. */
+function countsInWords(rows: readonly DeliveryRow[]): string {
+  const states = [...new Set(rows.map(({ state }) => state))];
+  return states
+    .map((state) => `${rows.filter((row) => row.state === state).length} ${deliveryWords[state]}`)
+    .join(', ');
 }
 
 async function look(problemSetId: string): Promise<readonly DeliveryRow[]> {

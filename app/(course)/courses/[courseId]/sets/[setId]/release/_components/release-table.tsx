@@ -23,13 +23,18 @@ const columns = [
 ] as const;
 
 function row(student: ReleaseStudent, course: ReleaseOverview['course'], setId: string): TableRow {
+  const state = stateInWords(student, course.timeZone);
   return {
     id: student.userId,
     cells: {
-      student: { value: student.label, href: paths.reportOf(course.id, setId, student.userId) },
+      student: {
+        value: student.label,
+        node: <span className="whitespace-nowrap">{student.label}</span>,
+        href: paths.reportOf(course.id, setId, student.userId),
+      },
       section: student.sectionName,
       waiting: { value: student.partsWaiting, text: student.partsWaiting === 0 ? '' : String(student.partsWaiting) },
-      state: { value: stateInWords(student, course.timeZone) },
+      state: { value: state, node: <span className="whitespace-nowrap">{state}</span> },
     },
   };
 }
@@ -37,5 +42,5 @@ function row(student: ReleaseStudent, course: ReleaseOverview['course'], setId: 
 function stateInWords({ releasedAt, extendedUntil, partsWaiting }: ReleaseStudent, zone: string): string {
   if (releasedAt) return `released ${formatTime(releasedAt, zone, 'short')}`;
   if (extendedUntil) return `held back, extended to ${formatTime(extendedUntil, zone, 'short')}`;
-  return partsWaiting === 0 ? 'ready' : 'ready but for what waits';
+  return partsWaiting === 0 ? 'ready' : 'waits for marking';
 }
