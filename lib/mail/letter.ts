@@ -6,9 +6,13 @@ export type LetterPart =
   | { kind: 'link'; label: string; href: string }
   | { kind: 'note'; text: string }
   | { kind: 'heading'; text: string }
+  /** The name of a piece under a heading: a part of a question. */
+  | { kind: 'subheading'; text: string }
   /** A line that matters: a mark, a total. */
   | { kind: 'strong'; text: string }
   | { kind: 'list'; lines: readonly string[] }
+  /** Words after a few that say what they are. */
+  | { kind: 'labelled'; label: string; text: string }
   /** What somebody typed, letter for letter, after a few words that say what it is. */
   | { kind: 'typed'; label: string; text: string }
   /** What a teacher wrote; its formulas stand as TeX, because a mail reader has no stylesheet of ours. */
@@ -48,6 +52,10 @@ function renderText(letter: Letter): string {
         return wrap(part.text);
       case 'heading':
         return `${wrap(part.text)}\n${'-'.repeat(Math.min(part.text.length, 76))}`;
+      case 'subheading':
+        return `${part.text}.`;
+      case 'labelled':
+        return `${part.label}:\n${indent(part.text)}`;
       case 'list':
         return part.lines.map((line) => wrap(`- ${line}`)).join('\n');
       case 'typed':
@@ -70,6 +78,10 @@ function renderHtml(letter: Letter): string {
         return `<p style="margin:0 0 16px;font-weight:bold">${escapeHtml(part.text)}</p>`;
       case 'heading':
         return `<h2 style="margin:28px 0 12px;padding-top:16px;border-top:1px solid ${line};font-size:18px;line-height:1.35">${escapeHtml(part.text)}</h2>`;
+      case 'subheading':
+        return `<h3 style="margin:24px 0 6px;font-size:16px;line-height:1.35">${escapeHtml(part.text)}</h3>`;
+      case 'labelled':
+        return `<p style="margin:0 0 12px">${labelHtml(part.label)}${escapeHtml(part.text)}</p>`;
       case 'list':
         return `<ul style="margin:0 0 16px;padding-left:22px">${part.lines.map((text) => `<li>${escapeHtml(text)}</li>`).join('')}</ul>`;
       case 'typed':
@@ -78,7 +90,7 @@ function renderHtml(letter: Letter): string {
           `white-space:pre-wrap;word-break:break-word">${escapeHtml(part.text)}</code></p>`
         );
       case 'markdown':
-        return `<div style="margin:0 0 12px">${part.label === undefined ? '' : labelHtml(part.label)}${renderMarkdown(part.source, { tex: 'source' })}</div>`;
+        return `<div style="margin:0 0 12px">${part.label === undefined ? '' : labelHtml(part.label)}${markdownHtml(part.source)}</div>`;
       case 'note':
         return `<p style="margin:0 0 16px;color:${faint};font-size:14px">${escapeHtml(part.text)}</p>`;
       case 'link':
@@ -97,6 +109,11 @@ ${parts.join('\n')}
 </body>
 </html>
 `;
+}
+
+/** Markdown with paragraphs as close as those around it; raw HTML is text in it, so each `<p>` is the renderer's own. */
+function markdownHtml(source: string): string {
+  return renderMarkdown(source, { tex: 'source' }).replaceAll('<p>', '<p style="margin:0 0 8px">');
 }
 
 function linkHtml(label: string, href: string): string {

@@ -65,18 +65,17 @@ function itemParts(item: ReportedItem): LetterPart[] {
       { kind: 'paragraph', text: `You did not open this question: 0 of ${formatCredit(item.outOf)} marks.` },
     ];
   }
-  return [
-    heading,
-    { kind: 'markdown', label: 'What was asked', source: item.prompt },
-    ...item.parts.flatMap(partLines),
-  ];
+  return [heading, { kind: 'markdown', source: item.prompt }, ...item.parts.flatMap(partLines)];
 }
 
 function partLines(part: ReportedPart): LetterPart[] {
   const asked: LetterPart[] = [
-    { kind: 'markdown', label: `Part ${part.key}`, source: part.prompt },
+    { kind: 'subheading', text: `Part ${part.key}` },
+    { kind: 'markdown', source: part.prompt },
     ...(part.answer === null ? [] : [{ kind: 'typed' as const, label: 'You wrote', text: part.answer }]),
-    ...(part.readingPlain === '' ? [] : [{ kind: 'typed' as const, label: 'Read as', text: part.readingPlain }]),
+    ...(part.readingPlain === ''
+      ? []
+      : [{ kind: 'labelled' as const, label: 'Read as, in words', text: part.readingPlain }]),
   ];
   const outOf = formatCredit(part.outOf);
   switch (part.state) {

@@ -54,7 +54,14 @@ function row(delivery: DeliveryRow, { courseId, problemSetId, zone }: Omit<Deliv
       at: { value: at.getTime(), node: <OneLine>{formatTime(at, zone, 'short')}</OneLine> },
       tries: attempts,
       again: needsPerson(state)
-        ? { value: null, node: <Again ids={{ courseId, problemSetId, deliveryId: id }} delivery={delivery} /> }
+        ? {
+            value: null,
+            node: (
+              <OneLine>
+                <Again ids={{ courseId, problemSetId, deliveryId: id }} delivery={delivery} />
+              </OneLine>
+            ),
+          }
         : null,
     },
   };
