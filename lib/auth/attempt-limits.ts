@@ -7,13 +7,15 @@ const quarterHour = 15 * 60;
 
 /**
  * How many failures are let through in 15 minutes: few for one account, many for one address, since a whole campus may
- * share one. Asking for a reset mail is counted whether or not it "fails", because each may send a mail.
+ * share one. Asking for a reset mail is counted whether or not it "fails", because each may send a mail. Checks over
+ * the HTTP interface are counted by caller, each check as one: enough for a big course, too few to keep the threads busy.
  */
 export const attemptLimits = {
   'sign-in-account': 10,
   'sign-in-address': 300,
   'reset-account': 3,
   'reset-address': 60,
+  checks: 30_000,
 } as const;
 
 export type AttemptKind = keyof typeof attemptLimits;
@@ -26,18 +28,18 @@ export type CountedAttempt =
 const limiters = new WeakMap<Sequelize, Map<AttemptKind, RateLimiterPostgres>>();
 
 /**
- * Counts one try against a key before its outcome is known, so that many tries at once cannot all slip under the limit.
+ * Counts a try, worth one point unless told otherwise, against a key before its outcome is known, so that many tries at once cannot all slip under the limit.
  * The count lies in PostgreSQL and is shared by every web process. Keys are stored hashed.
  */
-export async function countAttempt(kind: AttemptKind, key: string): Promise<CountedAttempt> {
+export async function countAttempt(kind: AttemptKind, key: string, points = 1): Promise<CountedAttempt> {
   const limiter = limiterOf(kind);
   const stored = storedKey(key);
   try {
-    await limiter.consume(stored);
+    await limiter.consume(stored, points);
     return {
       allowed: true,
       forgive: async () => {
-        await limiter.reward(stored);
+        await limiter.reward(stored, points);
       },
     };
   } catch (refusal) {

@@ -13,7 +13,7 @@ let pool: Piscina<readonly CheckRequest[], ThreadResult[]> | null = null;
 
 function threads(): Piscina<readonly CheckRequest[], ThreadResult[]> {
   pool ??= new Piscina({
-    filename: path.join(import.meta.dirname, 'checker-worker.ts'),
+    filename: path.join(process.cwd(), 'lib/jobs/checker-worker.ts'),
     execArgv: ['--import', 'tsx'],
     minThreads: 1,
     maxThreads: 2,

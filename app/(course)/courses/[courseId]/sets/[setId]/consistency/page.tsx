@@ -75,7 +75,9 @@ export default async function ConsistencyPage({ params }: Props) {
               margin={
                 <MarginNote>
                   Kappa is 1 where all credits are the same and 0 where they are the same no more often than chance
-                  would make them. It is told with its interval only from 12 pairs on and where some differ.
+                  would make them. It is told with its interval only from 12 pairs on and where some differ. Leaning is
+                  how much more of the full credit the first named gave, on average; apart are the pairs beyond the
+                  set’s tolerance.
                 </MarginNote>
               }
             >

@@ -5,11 +5,11 @@ import { Picture } from '@/components/math/picture';
 import { coefficient, intervalText, kappaIntervalText, kappaText, percent } from '@/lib/presenters/agreement-words';
 import { type ConsistencyRow } from '@/lib/presenters/consistency';
 
-const width = 560;
+const width = 420;
 const rowHeight = 62;
 const head = 8;
 const left = 12;
-const right = 500;
+const right = 368;
 const ticks = [0, 0.25, 0.5, 0.75, 1];
 
 /**
@@ -25,7 +25,7 @@ export function AgreementPlot({ rows }: { rows: readonly ConsistencyRow[] }) {
       description={rows.map(describe).join(' ')}
       size={[width, bottom + 22]}
       table={{
-        head: ['graders', 'pairs', 'same credit', '95 % interval', 'kappa', '95 % interval'],
+        head: ['graders', 'pairs', 'same credit', '95 % interval', 'kappa', 'interval of kappa'],
         rows: rows.map(({ name, agreement }) => [
           name,
           String(agreement.pairs),

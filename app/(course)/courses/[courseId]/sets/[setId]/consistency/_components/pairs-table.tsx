@@ -6,11 +6,9 @@ const columns: readonly TableColumn[] = [
   { key: 'name', label: 'Graders', heading: true },
   { key: 'pairs', label: 'Pairs', align: 'end' },
   { key: 'same', label: 'Same credit', align: 'end' },
-  { key: 'interval', label: '95 % interval', align: 'end', sortable: false },
   { key: 'kappa', label: 'Kappa', align: 'end' },
-  { key: 'kappaInterval', label: '95 % interval of kappa', align: 'end', sortable: false },
-  { key: 'difference', label: 'First less other', align: 'end' },
-  { key: 'apart', label: 'Beyond tolerance', align: 'end' },
+  { key: 'difference', label: 'Leaning', align: 'end' },
+  { key: 'apart', label: 'Apart', align: 'end' },
 ];
 
 /** The figures of each two graders. */
@@ -27,11 +25,22 @@ export function PairsTable({ rows }: { rows: readonly ConsistencyRow[] }) {
           pairs: agreement.pairs,
           same: agreement.agreement && {
             value: agreement.agreement.share,
-            text: percent(agreement.agreement.share),
+            node: (
+              <WithInterval
+                figure={percent(agreement.agreement.share)}
+                interval={intervalText(agreement.agreement.interval, percent)}
+              />
+            ),
           },
-          interval: agreement.agreement && intervalText(agreement.agreement.interval, percent),
-          kappa: { value: agreement.kappa.defined ? agreement.kappa.kappa : null, text: kappaText(agreement) },
-          kappaInterval: kappaIntervalText(agreement),
+          kappa: {
+            value: agreement.kappa.defined ? agreement.kappa.kappa : null,
+            node: (
+              <WithInterval
+                figure={kappaText(agreement)}
+                interval={agreement.kappa.defined ? kappaIntervalText(agreement) : ''}
+              />
+            ),
+          },
           difference: {
             value: agreement.meanDifference,
             text: agreement.meanDifference === null ? '' : percent(agreement.meanDifference),
@@ -40,5 +49,14 @@ export function PairsTable({ rows }: { rows: readonly ConsistencyRow[] }) {
         },
       }))}
     />
+  );
+}
+
+function WithInterval({ figure, interval }: { figure: string; interval: string }) {
+  return (
+    <>
+      <span className="whitespace-nowrap">{figure}</span>
+      <span className="block text-note whitespace-nowrap text-grey">{interval}</span>
+    </>
   );
 }
