@@ -26,7 +26,7 @@ export interface RunningHeadProps {
 /** The running head of every page, as in a book: course, set and place, with the pages of the course as a line of words. */
 export function RunningHead({ steps = [], place, status, nav = [], account, home = '/' }: RunningHeadProps) {
   return (
-    <header className="running-head px-(--gutter)">
+    <header className="running-head px-(--gutter) print:px-0">
       <div className="flex flex-col gap-x-6 gap-y-1 pt-4 pb-3 sm:grid sm:grid-cols-[1fr_auto] sm:items-baseline lg:grid-cols-[1fr_auto_1fr]">
         <Link
           href={home}
