@@ -2,11 +2,12 @@ import { type NavItem } from '@/components/ui/nav-line';
 import { type PersonActor } from '@/lib/domain/actor';
 import { isStaffRole } from '@/lib/domain/roles';
 import { canAdminister } from '@/lib/policies/can-administer';
+import { canUseCheckBench } from '@/lib/policies/can-use-check-bench';
 import { decide, type CourseForPolicy } from '@/lib/policies/decide';
 import { paths } from '@/lib/paths';
 
 /** The pages of the whole service. */
-export type SitePlace = 'courses' | 'work' | 'templates' | 'reading' | 'admin' | null;
+export type SitePlace = 'courses' | 'work' | 'templates' | 'reading' | 'bench' | 'admin' | null;
 
 /** The pages of one course. */
 export type CoursePlace = 'sets' | 'templates' | 'roster' | 'tokens' | 'log' | null;
@@ -20,6 +21,7 @@ export function siteNav(actor: PersonActor, here: SitePlace): NavItem[] {
     roles.includes('student') && { place: 'work', label: 'My work', href: paths.work() },
     (isStaff || actor.isAdministrator) && { place: 'templates', label: 'Templates', href: paths.templates() },
     { place: 'reading', label: 'Try a reading', href: paths.reading() },
+    canUseCheckBench(actor).allowed && { place: 'bench', label: 'Check bench', href: paths.bench() },
     actor.isAdministrator && { place: 'admin', label: 'Administration', href: paths.adminCourses() },
   ]
     .filter((item) => item !== false)

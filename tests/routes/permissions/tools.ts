@@ -1,7 +1,14 @@
+import { paths } from '@/lib/paths';
 import { type Row } from '../matrix/row';
 
 /** Checking against a reference: for the staff of any course and administrators, never for a student. */
 export const rows: readonly Row[] = [
+  {
+    kind: 'page',
+    file: '(tools)/bench/page.tsx',
+    path: paths.bench,
+    expect: ['sign-in', 'refuse', 'allow', 'allow', 'allow', 'allow', 'allow'],
+  },
   {
     kind: 'route',
     file: 'api/v1/checks/route.ts',
