@@ -10,7 +10,9 @@ import { requireAllowed } from '@/lib/policies/decide';
 import { BenchForm } from './_components/bench-form';
 import { benchInputSchema, declarationsIn } from './_components/bench-input';
 import { Examples } from './_components/examples';
+import { figuresOfPair } from './_components/figures-of-pair';
 import { Outcome } from './_components/outcome';
+import { Pictures } from './_components/pictures';
 
 export const metadata = { title: 'Check bench' };
 
@@ -27,6 +29,10 @@ export default async function BenchPage({ searchParams }: Props) {
   const counted = ready ? await countAttempt('checks', `user ${actor.userId}`) : null;
   const options = upToPhase ? { upToPhase: true } : {};
   const [pair] = counted?.allowed ? await checkMany([{ id: 'bench', kind, reference, answer, symbols, options }]) : [];
+  const outcome = pair?.outcome;
+  const readable = outcome !== undefined && 'verdict' in outcome && outcome.verdict !== 'unreadable' ? outcome : null;
+  const figures =
+    readable && (await figuresOfPair({ kind, reference, answer, symbols }, readable.evidence.witness?.values));
   return (
     <>
       <SiteHead actor={actor} here="bench" place="Check bench" />
@@ -56,6 +62,7 @@ export default async function BenchPage({ searchParams }: Props) {
           </Section>
         ) : null}
         {pair ? <Outcome pair={pair} /> : null}
+        {figures ? <Pictures figures={figures} /> : null}
       </ScriptPage>
     </>
   );

@@ -13,7 +13,7 @@ export function Elements({ elements }: { elements: readonly (readonly number[])[
   }
   const differs = (row: number, column: number) => elements.some(([r, c]) => r === row && c === column);
   return (
-    <table className="border-x-2 border-edge text-small">
+    <table className="justify-self-start border-x-2 border-edge text-small">
       <caption className="mb-1 text-start text-note text-grey">Element by element</caption>
       <tbody>
         {indices.map((row) => (
