@@ -112,7 +112,7 @@ export default async function UploadPage({ params, searchParams }: Props) {
                   </Link>
                 ))}
               </nav>
-              <RowTable rows={rows} caption={`Rows of ${intake.fileName}`} />
+              <RowTable rows={rows} caption={`Rows of ${intake.fileName}`} taken={intake.state !== 'previewed'} />
               <Pager
                 page={page}
                 pageCount={Math.max(1, Math.ceil(shown[filter] / perPage))}

@@ -3,7 +3,16 @@ import { ScrollReach } from '@/components/math/scroll-reach';
 import { type IntakeRowLine } from '@/lib/queries/intake-rows';
 
 /** The rows of an upload in the order of the sheet, each with what becomes of it. */
-export function RowTable({ rows, caption }: { rows: readonly IntakeRowLine[]; caption: string }) {
+export function RowTable({
+  rows,
+  caption,
+  taken,
+}: {
+  rows: readonly IntakeRowLine[];
+  caption: string;
+  /** Whether the good rows have been taken in; before, they are only good. */
+  taken: boolean;
+}) {
   if (rows.length === 0) return <p className="py-4 text-grey">No such row in this sheet.</p>;
   return (
     <ScrollReach>
@@ -31,7 +40,7 @@ export function RowTable({ rows, caption }: { rows: readonly IntakeRowLine[]; ca
               </td>
               <td className="max-w-64 py-1 pe-4 font-mono text-note break-words">{row.answer}</td>
               <td className="py-1">
-                <What row={row} />
+                <What row={row} taken={taken} />
               </td>
             </tr>
           ))}
@@ -41,7 +50,7 @@ export function RowTable({ rows, caption }: { rows: readonly IntakeRowLine[]; ca
   );
 }
 
-function What({ row }: { row: IntakeRowLine }) {
+function What({ row, taken }: { row: IntakeRowLine; taken: boolean }) {
   if (row.state === 'refused') {
     return (
       <>
@@ -51,5 +60,5 @@ function What({ row }: { row: IntakeRowLine }) {
   }
   if (row.verdict) return <VerdictSign verdict={row.verdict} detail={row.queued ? 'waits for a person' : undefined} />;
   if (row.checkState === 'waiting') return <>Being checked</>;
-  return <>{row.message ?? 'Taken in'}</>;
+  return <>{row.message ?? (taken ? 'Taken in' : 'Good')}</>;
 }
