@@ -64,3 +64,20 @@ export async function answerQuestion(student: Person, set: { url: string; name: 
   await student.inspect('set with receipts');
   return draw;
 }
+
+/** Reads the released report, and appeals the wrong energies. */
+export async function appealEnergies(student: Person, set: { url: string; name: RegExp }): Promise<void> {
+  const { page } = student;
+  await page.goto(`${set.url}/work`);
+  const released = page.getByRole('region', { name: set.name });
+  await released.getByRole('link', { name: 'Read the score report' }).click();
+  await page.getByRole('button', { name: 'Appeal this part: question 1, part b' }).waitFor();
+  await student.inspect('score report');
+  await page.getByRole('button', { name: 'Appeal this part: question 1, part b' }).click();
+  await page
+    .getByLabel('Why should it be marked otherwise?')
+    .fill('The sign and the units are right; a factor is not.');
+  await student.inspect('appeal');
+  await page.getByRole('dialog').getByRole('button', { name: 'Appeal this part' }).click();
+  await page.getByText('You get a corrected report when it is answered.').waitFor();
+}
