@@ -47,8 +47,10 @@ function decidedBy(verdict: Verdict, { test, bound, fields, branches, points, re
       return reason ? sentence(reason) : 'The units do not match.';
     case 'text':
       return 'Compared as a label.';
-    case 'structure':
+    // What could not be read is said by the check's own message.
     case 'reading':
+      return '';
+    case 'structure':
     case 'none':
       return reason ? sentence(reason) : '';
   }

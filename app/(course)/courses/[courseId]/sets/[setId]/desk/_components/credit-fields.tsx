@@ -16,6 +16,7 @@ interface CreditFieldsProps {
   readonly comment: string;
   readonly onComment: (comment: string) => void;
   readonly commentLabel: string;
+  readonly commentRequired: boolean;
   readonly faults: FieldFaults;
   /** A word behind "of 4": "suggested". */
   readonly state?: string;
@@ -23,7 +24,7 @@ interface CreditFieldsProps {
 
 /** Credit by one press or one key, or typed; and the comment to the student. */
 export function CreditFields(props: CreditFieldsProps) {
-  const { quick, outOf, credit, onCredit, comment, onComment, commentLabel, faults, state } = props;
+  const { quick, outOf, credit, onCredit, comment, onComment, commentLabel, commentRequired, faults, state } = props;
   return (
     <div className="grid gap-4">
       <div>
@@ -70,6 +71,7 @@ export function CreditFields(props: CreditFieldsProps) {
         id={commentBoxId}
         name="comment"
         label={commentLabel}
+        optional={!commentRequired}
         value={comment}
         onChange={(event) => onComment(event.target.value)}
         error={faults.comment}

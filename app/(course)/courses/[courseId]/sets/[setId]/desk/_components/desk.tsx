@@ -66,6 +66,7 @@ export function Desk(props: DeskProps) {
               onCredit={setCredit}
               comment={comment}
               onComment={setComment}
+              commentRequired={kind === 'appeal'}
               commentLabel={kind === 'appeal' ? 'Reply to the student' : 'Comment to the student'}
               faults={ruling.faults}
               state={suggested !== '' && credit === suggested ? 'suggested' : undefined}

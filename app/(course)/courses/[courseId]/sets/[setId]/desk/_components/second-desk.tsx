@@ -60,6 +60,7 @@ export function SecondDesk({ ids, what, quick, outOf, sheet, above }: SecondDesk
               onCredit={setCredit}
               comment={comment}
               onComment={setComment}
+              commentRequired={what === 'settle'}
               commentLabel={label}
               faults={faults}
             />
