@@ -80,7 +80,7 @@ export async function workQueue(grader: Person, setUrl: string): Promise<number>
   }
 }
 
-/** Does every second marking that is assigned, blind; the first of them more generously than the first marker. */
+/** Does every second marking that is assigned, blind; the first that can be read more generously than the first marker. */
 export async function markSecondly(grader: Person, setUrl: string, generous: boolean): Promise<number> {
   const { page } = grader;
   await page.goto(`${setUrl}/queue`);
@@ -90,13 +90,16 @@ export async function markSecondly(grader: Person, setUrl: string, generous: boo
   await list.getByRole('link').first().click();
   await page.waitForURL(/\/desk\/second\//);
   let marked = 0;
+  let mayBeGenerous = generous;
   for (;;) {
     await page.waitForURL(/\/desk\/second\/|\/queue$/);
     if (!page.url().includes('/second/')) return marked;
     await page.getByRole('group', { name: 'Second marking' }).waitFor();
     if (marked === 0) await grader.inspect('second marking');
     const here = page.url();
-    await page.keyboard.press((await isUnreadable(page)) ? '0' : generous && marked === 0 ? '3' : '1');
+    const unreadable = await isUnreadable(page);
+    await page.keyboard.press(unreadable ? '0' : mayBeGenerous ? '3' : '1');
+    mayBeGenerous &&= unreadable;
     await page.keyboard.press('Enter');
     await page.waitForURL((address) => address.toString() !== here);
     marked += 1;
