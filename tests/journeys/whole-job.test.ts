@@ -86,12 +86,9 @@ describe('from template to corrected report', { timeout: 240_000 }, () => {
     expect(await settleAll(headTa, setUrl)).toBe(1);
     const { page } = headTa;
     await page.goto(`${setUrl}/consistency`);
-    await page.getByRole('img', { name: /agree/i }).first().waitFor();
-    await page
-      .getByRole('cell', { name: /Priya Lanternby|Oskar Millrace/ })
-      .or(page.getByText('Oskar Millrace'))
-      .first()
-      .waitFor();
+    await page.getByRole('region', { name: 'Agreement in a picture' }).getByRole('img').waitFor();
+    const pairs = page.getByRole('region', { name: 'Graders in pairs', exact: true });
+    expect(await pairs.getByRole('row').filter({ hasText: 'Priya Lanternby' }).count()).toBe(4);
     await headTa.inspect('consistency');
   });
 
