@@ -18,6 +18,8 @@ export const choices = {
   exponent: 8,
   /** A run of letters splits in another way, or `2e-3` is a product. */
   split: 16,
+  /** An unbraced exponent of e that goes on also takes operators: `e^-iθσ_x/2`. */
+  operatorExponent: 32,
 } as const;
 
 /** The mutually recursive rules, so that each can live in its own file. */

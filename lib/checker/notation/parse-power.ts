@@ -2,7 +2,7 @@
 import { choices, type Cursor } from './cursor';
 import { maximumMarks } from './limits';
 import { numberNode } from './parse-number';
-import { exponentGoesOn, parseLongExponent } from './parse-run';
+import { exponentGoesOn, operatorFollows, parseLongExponent } from './parse-run';
 import { isSign, parseSigned } from './parse-sign';
 import { startsOperand } from './starts';
 import { type Token } from './token';
@@ -92,8 +92,13 @@ function parseCaret(cursor: Cursor, base: Expression): Expression {
   const exponent = parseExponent(cursor);
   const ofEuler = isEuler(base);
   if (token.kind !== '(' && exponentGoesOn(cursor, exponent, ofEuler)) {
-    if (cursor.takes(choices.exponent)) return raise(cursor, base, parseLongExponent(cursor, exponent));
-    cursor.meet(choices.exponent, { start: base.span.start, end: cursor.peek().end });
+    const withOperators = ofEuler && cursor.takes(choices.operatorExponent);
+    if (withOperators || cursor.takes(choices.exponent)) {
+      return raise(cursor, base, parseLongExponent(cursor, exponent, withOperators));
+    }
+    const span = { start: base.span.start, end: cursor.peek().end };
+    cursor.meet(choices.exponent, span);
+    if (ofEuler && operatorFollows(cursor)) cursor.meet(choices.operatorExponent, span);
   }
   return raise(cursor, base, exponent);
 }

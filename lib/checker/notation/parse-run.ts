@@ -141,8 +141,28 @@ function isProperFraction(top: number, bottom: number): boolean {
   return one === 1;
 }
 
-/** The exponent together with the product or quotient that follows it: the reading that `exponentGoesOn` asks about. */
-export function parseLongExponent(cursor: Cursor, exponent: Expression): Expression {
+/** Whether an operator stands in the unwritten product here, in which case an exponent of e may have it, too. */
+export function operatorFollows(cursor: Cursor): boolean {
+  for (let distance = 0; distance < longestExponent; distance += 1) {
+    const token = cursor.ahead(distance);
+    if (isOperatorWord(token)) return true;
+    if (token.kind !== '/' && !runGoesOn(cursor, token)) return false;
+  }
+  return false;
+}
+
+/** Tokens of an exponent that are looked at for an operator, so that reading stays linear. */
+const longestExponent = 16;
+
+function isOperatorWord(token: Token): boolean {
+  return token.kind === 'word' && token.meaning?.is === 'operator';
+}
+
+/**
+ * The exponent together with the product or quotient that follows it: the reading that `exponentGoesOn` asks about. With
+ * operators it is the exponential of an operator.
+ */
+export function parseLongExponent(cursor: Cursor, exponent: Expression, withOperators: boolean): Expression {
   const sign = exponent.node === 'sum' && exponent.terms.length === 1 ? exponent.terms[0] : undefined;
   const factors: Factor[] = [{ join: 'unwritten', body: sign?.body ?? exponent }];
   let divided = false;
@@ -154,10 +174,10 @@ export function parseLongExponent(cursor: Cursor, exponent: Expression): Express
       divided = true;
       continue;
     }
-    if (!runGoesOn(cursor, token)) break;
+    if (!runGoesOn(cursor, token) && !(withOperators && isOperatorWord(token))) break;
     const from = cursor.at;
     const body = cursor.grammar.power(cursor);
-    if (body.type !== 'scalar') {
+    if (body.type !== 'scalar' && !(withOperators && body.type === 'operator')) {
       cursor.giveBack(from, body);
       break;
     }
@@ -166,7 +186,7 @@ export function parseLongExponent(cursor: Cursor, exponent: Expression): Express
   const body = productOf(cursor, factors);
   if (sign === undefined || exponent.node !== 'sum') return body;
   const span = { start: exponent.span.start, end: body.span.end };
-  return cursor.node({ ...exponent, span, terms: [{ sign: sign.sign, body }] });
+  return cursor.node({ ...exponent, type: body.type, span, terms: [{ sign: sign.sign, body }] });
 }
 
 /**
@@ -224,7 +244,7 @@ function productOf(cursor: Cursor, factors: readonly Factor[]): Expression {
   if (first === undefined || last === undefined)
     return cursor.fail('missing-operand', cursor.peek(), 'Something is missing here.');
   if (factors.length === 1) return first;
-  const type = factors.every(({ body }) => body.type === 'scalar') ? 'scalar' : last.type;
+  const type = factors.findLast(({ body }) => body.type !== 'scalar')?.body.type ?? 'scalar';
   const span = { start: first.span.start, end: last.span.end };
   return cursor.node<ProductNode>({ node: 'product', type, span, factors });
 }

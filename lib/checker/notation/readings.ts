@@ -76,6 +76,10 @@ const sentences: Readonly<Record<number, { readonly message: string; readonly hi
     message: 'Where this exponent ends can be read in two ways.',
     hint: 'Write brackets, as in e^(i*x).',
   },
+  [choices.operatorExponent]: {
+    message: 'Where this exponent ends can be read in two ways.',
+    hint: 'Write brackets, as in exp(-i*x*σ_z).',
+  },
   [choices.split]: {
     message: 'These letters can be read as different products.',
     hint: 'Write * between the names.',

@@ -1,5 +1,5 @@
 /** Splitting a run of letters into names: leftmost longest first, with backtracking, in linear time. */
-import { plainMeaning, type Scope, type Spelling } from './scope';
+import { greekLetter, plainMeaning, type Scope, type Spelling } from './scope';
 import { builtInByFirst, builtInWords, operatorMeaning, type Meaning } from './vocabulary';
 
 /** What follows the run: the last name must carry it. */
@@ -24,11 +24,13 @@ export interface Split {
 
 /**
  * The split of a run whose last name carries the suffix, or null where none is complete.
- * A run that is one word as a whole is that word, whatever its letters could mean.
+ * A run that is one word of the language or a Greek letter's name as a whole is that word, whatever its letters could
+ * mean; a word that an author made up and declared can still be meant as the product of shorter names, the other split.
  */
 export function splitRun(run: string, suffix: Suffix, scope: Scope): Split | null {
   const whole = meaningAtEnd(run, 0, suffix, scope, false);
-  if (whole) return { pieces: [{ start: 0, end: run.length, meaning: whole }], other: null };
+  const isOwnWord = suffix.index === '' && suffix.primes === 0 && scope.plain.has(run) && greekLetter(run) === run;
+  if (whole && !isOwnWord) return { pieces: [{ start: 0, end: run.length, meaning: whole }], other: null };
   return run.length === 1
     ? splitWith(run, suffix, scope, true)
     : (splitWith(run, suffix, scope, false) ?? splitWith(run, suffix, scope, true));

@@ -192,8 +192,10 @@ class Resolver {
   }
 
   private pieces(token: Token, split: Split, index: string | null, next: number, endOfIndex = -1): void {
-    const pieces = this.other && split.other ? split.other : split.pieces;
-    if (split.other) this.ambiguous ??= token;
+    // Set upright as one word, as the printer does, a name is meant as a whole.
+    const other = token.upright && split.pieces.length === 1 ? null : split.other;
+    const pieces = this.other && other ? other : split.pieces;
+    if (other) this.ambiguous ??= token;
     const end = endOfIndex >= 0 ? endOfIndex : this.token(next - 1).end;
     if (pieces.length === 1) {
       token.end = end;
