@@ -5,7 +5,7 @@ import type { IncomingMessage } from 'node:http';
 import type { ReadableStream } from 'node:stream/web';
 import { errors as formidableErrors, formidable } from 'formidable';
 import { HalfmarkError } from '@/lib/errors';
-import { incomingFolder, incomingName } from './storage';
+import { discardIncoming, incomingFolder, incomingName } from './storage';
 
 /** One file as it came in, on disk but not yet kept. */
 export type Upload = { incomingPath: string; originalName: string };
@@ -20,9 +20,15 @@ const ENVELOPE_BYTES = 64 * 1024;
 export async function receiveUpload(request: Request, maxBytes: number): Promise<Upload> {
   const announced = Number(request.headers.get('content-length') ?? '0');
   if (announced > maxBytes + ENVELOPE_BYTES) throw tooLarge(maxBytes);
+  const uploadDir = await incomingFolder();
+  const begun: string[] = [];
   const form = formidable({
-    uploadDir: await incomingFolder(),
-    filename: incomingName,
+    uploadDir,
+    filename: () => {
+      const name = incomingName();
+      begun.push(path.join(uploadDir, name));
+      return name;
+    },
     maxFiles: 1,
     maxFileSize: maxBytes,
     maxFields: 20,
@@ -38,6 +44,7 @@ export async function receiveUpload(request: Request, maxBytes: number): Promise
     await stat(file.filepath);
     return { incomingPath: file.filepath, originalName: plainName(file.originalFilename) };
   } catch (error) {
+    for (const cutShort of begun) await discardIncoming(cutShort);
     throw refusalOf(error, maxBytes);
   } finally {
     message.destroy();

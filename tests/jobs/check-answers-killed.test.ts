@@ -1,5 +1,3 @@
-import { fork, type ChildProcess } from 'node:child_process';
-import path from 'node:path';
 import { afterEach, describe, expect, it } from 'vitest';
 import { inTransaction } from '@/lib/db/transaction';
 import { enqueue } from '@/lib/queue/enqueue';
@@ -9,35 +7,9 @@ import { CreditEntry } from '@/models/credit-entry';
 import { buildAnswer } from '@/tests/factories/answers';
 import { buildClassroom } from '@/tests/factories/classroom';
 import { until } from '../queue/worker-process';
+import { kill, killAll, startRealWorker } from './real-worker';
 
-const workers: ChildProcess[] = [];
-
-/** The worker itself, as it runs in production, in a process of its own. */
-async function startWorker(): Promise<ChildProcess> {
-  const child = fork(path.resolve('lib/jobs/worker.ts'), [], {
-    execArgv: ['--import', 'tsx'],
-    env: { ...process.env, LOG_LEVEL: 'silent' },
-    stdio: ['ignore', 'inherit', 'inherit', 'ipc'],
-  });
-  workers.push(child);
-  await new Promise<void>((resolve, reject) => {
-    child.once('message', () => resolve());
-    child.once('exit', (code) => reject(new Error(`The worker ended at once (${code}).`)));
-  });
-  return child;
-}
-
-function kill(child: ChildProcess): Promise<void> {
-  return new Promise((resolve) => {
-    if (child.exitCode !== null || child.signalCode !== null) return resolve();
-    child.once('exit', () => resolve());
-    child.kill('SIGKILL');
-  });
-}
-
-afterEach(async () => {
-  await Promise.all(workers.splice(0).map(kill));
-});
+afterEach(killAll);
 
 describe('a worker killed in the midst of checking', () => {
   it('leaves every answer with exactly one verdict once another worker has taken over', async () => {
@@ -55,14 +27,14 @@ describe('a worker killed in the midst of checking', () => {
     await inTransaction((transaction) => enqueue('check-answers', { answerIds }, { transaction }));
     const checked = () => AnswerCheck.count();
 
-    const doomed = await startWorker();
+    const doomed = await startRealWorker();
     await until(async () => (await checked()) > 0, 'the first verdicts are stored', 30_000);
     await kill(doomed);
     const whenKilled = await checked();
     expect(whenKilled).toBeGreaterThan(0);
     expect(whenKilled).toBeLessThan(answerIds.length);
 
-    await startWorker();
+    await startRealWorker();
     await until(async () => (await checked()) === answerIds.length, 'every answer has its verdict', 40_000);
     expect(await AnswerCheck.count({ distinct: true, col: 'answerId' })).toBe(answerIds.length);
     expect(await Answer.count({ where: { checkState: 'checked' } })).toBe(answerIds.length);
