@@ -35,7 +35,7 @@ export function TimeStamp({ at, zone, style = 'full' }: TimeStampProps) {
     timeZone: zone,
   }).format(moment);
   return (
-    <time dateTime={moment.toISOString()} title={exact} className="whitespace-nowrap">
+    <time dateTime={moment.toISOString()} title={exact} className="sm:whitespace-nowrap">
       {formatTime(moment, zone, style)}
     </time>
   );

@@ -35,8 +35,8 @@ export type MarkedAnswer = {
   /** Recognised slips as sentences, the likeliest first. */
   slips: string[];
   evidence: string[];
-  /** Both sides worked out, element by element, where both are matrices or columns of one shape. */
-  elements: { reference: MatrixElements; answer: MatrixElements; differ: boolean[][] } | null;
+  /** The answer worked out, element by element, where it is a matrix or column of the reference's shape and differs. */
+  elements: { answer: MatrixElements; differ: boolean[][] } | null;
 };
 
 /** Presents an answer to those who mark it. */
@@ -71,7 +71,7 @@ export function presentMarkedAnswer(row: AnswerForMarking, { named }: { named: b
 
 const withElements: readonly AnswerKind[] = ['operator', 'pauli', 'state', 'vector'];
 
-/** Both sides worked out, so that element stands beside element whatever way the answer was written. */
+/** The answer worked out, so that element stands beside element whatever way it was written. */
 function elementsOf({ content, values, partKey, text, check }: AnswerForMarking): MarkedAnswer['elements'] {
   if (check?.verdict !== 'differs') return null;
   const reference = referenceOf(content, partKey, values);
@@ -87,5 +87,5 @@ function elementsOf({ content, values, partKey, text, check }: AnswerForMarking)
       (_, column) => marked.has(`${index + 1},${column + 1}`) || (row.length === 1 && marked.has(`${index + 1}`)),
     ),
   );
-  return { reference: wanted, answer: given, differ };
+  return { answer: given, differ };
 }

@@ -36,17 +36,13 @@ export function AnswerSheet({ answer, zone }: { answer: MarkedAnswer; zone: stri
           ) : (
             <p className="text-grey">It could not be read.</p>
           )}
-        </Side>
-        {answer.elements ? (
-          <>
-            <Side words="Worked out">
-              <MatrixGrid elements={answer.elements.reference} />
-            </Side>
-            <Side words="Worked out, what differs underlined" second>
+          {answer.elements ? (
+            <>
+              <p className="mt-2 text-small text-grey">Worked out, what differs underlined</p>
               <MatrixGrid elements={answer.elements.answer} differ={answer.elements.differ} />
-            </Side>
-          </>
-        ) : null}
+            </>
+          ) : null}
+        </Side>
       </div>
       <p className="mt-3 border-l-4 border-edge bg-wash px-3 py-2 font-mono text-small break-words whitespace-pre-wrap">
         <span className="sr-only">As it was typed: </span>

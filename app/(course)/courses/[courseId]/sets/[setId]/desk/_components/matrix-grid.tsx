@@ -4,7 +4,7 @@ import { type MatrixElements } from '@/lib/presenters/matrix-elements';
 interface MatrixGridProps {
   readonly elements: MatrixElements;
   /** Which elements differ, by row and column. */
-  readonly differ?: readonly (readonly boolean[])[];
+  readonly differ: readonly (readonly boolean[])[];
 }
 
 /** A matrix or column, element by element; those that differ are underlined and coloured, and said so in words. */
@@ -19,7 +19,7 @@ export function MatrixGrid({ elements: { before, rows, behind }, differ }: Matri
               <tr key={at}>
                 {row.map((element, column) => (
                   <td key={column} className="px-2 py-1 text-center">
-                    {differ?.[at]?.[column] ? (
+                    {differ[at]?.[column] ? (
                       <span className="border-b-2 border-madder text-madder">
                         <Typeset latex={element} />
                         <span className="sr-only"> differs</span>

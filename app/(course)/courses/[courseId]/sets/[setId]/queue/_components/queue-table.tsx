@@ -38,14 +38,7 @@ const columns: TableColumn[] = [
 /** What waits, as a dense table to sort and filter. */
 export function QueueTable({ lines }: { lines: readonly QueueLine[] }) {
   const rows = useMemo(() => lines.map(rowOf), [lines]);
-  return (
-    <DataTable
-      caption="Waiting for a person"
-      columns={columns}
-      rows={rows}
-      filterLabel="Filter by part, script, section, verdict, slip or state"
-    />
-  );
+  return <DataTable caption="Waiting for a person" columns={columns} rows={rows} filterLabel="Filter" />;
 }
 
 function rowOf(line: QueueLine): TableRow {
