@@ -18,7 +18,7 @@ const config = {
   experimental: { authInterrupts: true },
   // `next dev` is met at the same address as the built pages.
   allowedDevOrigins: ['127.0.0.1'],
-  serverExternalPackages: ['sequelize', 'graphile-worker', 'piscina', 'pino', '@node-rs/argon2'],
+  serverExternalPackages: ['sequelize', 'graphile-worker', 'piscina', 'esbuild', 'pino', '@node-rs/argon2'],
   distDir: process.env.HALFMARK_DIST_DIR ?? '.next',
   headers: () => Promise.resolve([{ source: '/:path*', headers: securityHeaders }]),
 };

@@ -1,26 +1,37 @@
-import path from 'node:path';
 import { Piscina } from 'piscina';
 import type { CheckRequest } from '@/lib/checker/contract';
 import { log } from '@/lib/log';
 import type { ThreadResult } from './checker-worker';
+import { compiledChecker } from './compiled-checker';
 
 /** One check takes under a millisecond and is bounded by its own count of steps; this ends a thread that hangs all the same. */
 const BACKSTOP_MS = 1_000;
 /** Room for starting a thread, which loads the checker first. */
 const START_MS = 10_000;
 
-let pool: Piscina<readonly CheckRequest[], ThreadResult[]> | null = null;
+type Threads = Piscina<readonly CheckRequest[], ThreadResult[]>;
 
-function threads(): Piscina<readonly CheckRequest[], ThreadResult[]> {
-  pool ??= new Piscina({
-    filename: path.join(process.cwd(), 'lib/jobs/checker-worker.ts'),
-    execArgv: ['--import', 'tsx'],
+let pool: Promise<Threads> | null = null;
+
+/** The threads of this process; a start that failed is not kept, so that the next check tries again. */
+function threads(): Promise<Threads> {
+  pool ??= startThreads().catch((error: unknown) => {
+    pool = null;
+    throw error;
+  });
+  return pool;
+}
+
+async function startThreads(): Promise<Threads> {
+  return new Piscina({
+    filename: await compiledChecker(),
+    // A compiled script needs nothing that this process was started with, such as a loader of TypeScript.
+    execArgv: [],
     minThreads: 1,
     maxThreads: 2,
     idleTimeout: 30_000,
     resourceLimits: { maxOldGenerationSizeMb: 256 },
   });
-  return pool;
 }
 
 /** A request the checker gave no answer to in time, or at all. */
@@ -51,12 +62,13 @@ export async function checkInThread(requests: readonly CheckRequest[]): Promise<
 }
 
 async function runBounded(requests: readonly CheckRequest[]): Promise<ThreadResult[]> {
-  return threads().run(requests, { signal: AbortSignal.timeout(START_MS + BACKSTOP_MS * requests.length) });
+  const held = await threads();
+  return held.run(requests, { signal: AbortSignal.timeout(START_MS + BACKSTOP_MS * requests.length) });
 }
 
 /** Ends the threads of this process; a later check starts new ones. */
 export async function closeCheckerPool(): Promise<void> {
   const held = pool;
   pool = null;
-  await held?.destroy();
+  await (await held)?.destroy();
 }
