@@ -11,7 +11,15 @@ import accounts from '@/seeders/demo-accounts.json' with { type: 'json' };
 import { launchBrowser, personAt, signIn, type Person } from '../setup/browser';
 import { startHalfmark, type RunningHalfmark } from '../setup/running-halfmark';
 import { openSet, writeQuestion } from './steps/instructor';
-import { answerAppeal, markSecondly, settleAll, takeInSheet, workQueue } from './steps/graders';
+import {
+  answerAppeal,
+  markSecondly,
+  outcomeHeaders,
+  settleAll,
+  takeInSheet,
+  uploadDirectly,
+  workQueue,
+} from './steps/graders';
 import { closeAndRelease, watchDeliveries } from './steps/release';
 import { answerQuestion, appealEnergies } from './steps/student';
 
@@ -69,6 +77,23 @@ describe('from template to corrected report', { timeout: 240_000 }, () => {
     expect(outcome.filter((line) => line.includes(',taken in,'))).toHaveLength(good);
     expect(outcome.filter((line) => line.includes(',refused,'))).toHaveLength(2);
     expect(outcome.filter((line) => line.includes('waiting'))).toEqual([]);
+  });
+
+  it('a sheet that is too large or no sheet is refused with a plain sentence, and sheets leave as attachments', async () => {
+    const grader = await at('Priya Lanternby');
+    const buffer = Buffer.alloc(26 * 1024 * 1024, 'x,1,a,2\n');
+    const large = await uploadDirectly(grader, setUrl, { name: 'large.csv', mimeType: 'text/csv', buffer });
+    expect(large).toMatchObject({ status: 413, type: 'application/problem+json' });
+    expect(large.said).toContain('The file is larger than 25 MB.');
+    const pdf = Buffer.from('%PDF-1.7\n1 0 obj\n<< /Type /Catalog >>\nendobj\n');
+    const wrong = await uploadDirectly(grader, setUrl, { name: 'answers.csv', mimeType: 'text/csv', buffer: pdf });
+    expect(wrong.status).toBe(415);
+    expect(wrong.said).toContain('This is a PDF file, whatever its name says.');
+    expect(await outcomeHeaders(grader, setUrl)).toMatchObject({
+      'content-type': 'text/csv; charset=utf-8',
+      'content-disposition': expect.stringMatching(/^attachment; filename="/) as string,
+      'x-content-type-options': 'nosniff',
+    });
   });
 
   it('the TA works the queue by keyboard, and other graders mark a second time without seeing the first mark', async () => {
