@@ -5,7 +5,8 @@ import { PageTitle, ScriptPage, Section } from '@/components/ui/script-page';
 import { sentenceOf, slipIds } from '@/lib/checker';
 import { paths } from '@/lib/paths';
 import { templateForEditor } from '@/lib/queries/template-for-editor';
-import { renderPreview } from './_components/render-preview';
+import { type TemplateDraft } from '@/lib/templates/draft';
+import { renderPreview, type RenderedPreview } from './_components/render-preview';
 import { TemplateEditor } from './_components/template-editor';
 import { Versions } from './_components/versions';
 
@@ -38,7 +39,7 @@ export default async function TemplatePage({ params }: Props) {
             topics={template.topics}
             mayWrite={template.mayWrite}
             nextNumber={(latest?.number ?? 0) + 1}
-            preview={renderPreview(template.draft)}
+            preview={previewLater(template.draft)}
             slips={slipIds.map((id) => ({ id, sentence: sentenceOf(id) }))}
           />
         </Section>
@@ -48,4 +49,13 @@ export default async function TemplatePage({ params }: Props) {
       </ScriptPage>
     </>
   );
+}
+
+/** The time in which the rest of the page is written and sent, in milliseconds; the preview would hold it up. */
+const HEAD_START = 50;
+
+/** The preview, worked out when the rest of the page has been sent. */
+async function previewLater(draft: TemplateDraft): Promise<RenderedPreview> {
+  await new Promise((resolve) => setTimeout(resolve, HEAD_START));
+  return renderPreview(draft);
 }

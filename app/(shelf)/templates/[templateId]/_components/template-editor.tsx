@@ -1,5 +1,6 @@
 'use client';
 
+import { Progress } from '@/components/ui/progress';
 import { type TemplateDraft } from '@/lib/templates/draft';
 import { type TemplateProblem } from '@/lib/templates/template-problem';
 import { ConditionFields } from './condition-fields';
@@ -23,7 +24,8 @@ export interface TemplateEditorProps {
   readonly mayWrite: boolean;
   /** The number that the next published version will have. */
   readonly nextNumber: number;
-  readonly preview: RenderedPreview;
+  /** What the draft makes, which comes after the fields so that nobody waits for it to begin writing. */
+  readonly preview: Promise<RenderedPreview>;
   /** The catalogue of slips that may be given credit. */
   readonly slips: readonly SlipWords[];
 }
@@ -32,9 +34,10 @@ export interface TemplateEditorProps {
 export function TemplateEditor({ templateId, mayWrite, nextNumber, slips, ...initial }: TemplateEditorProps) {
   const state = useDraft(templateId, initial);
   const { draft, change, preview } = state;
-  const mistakes = preview.problems.filter(isMistake);
+  const problems = preview?.problems ?? [];
+  const mistakes = problems.filter(isMistake);
   return (
-    <ProblemContext value={preview.problems}>
+    <ProblemContext value={problems}>
       <div className="grid gap-x-10 lg:grid-cols-2">
         <fieldset disabled={!mayWrite} className="grid min-w-0 content-start gap-9">
           <legend className="sr-only">The question’s source</legend>
@@ -58,12 +61,16 @@ export function TemplateEditor({ templateId, mayWrite, nextNumber, slips, ...ini
                   templateId={templateId}
                   revision={state.revision}
                   nextNumber={nextNumber}
-                  ready={state.status.is === 'saved' && mistakes.length === 0}
+                  ready={preview !== null && state.status.is === 'saved' && mistakes.length === 0}
                   mistakes={mistakes.length}
                 />
               </div>
             ) : null}
-            <Result preview={preview} stale={state.status.is !== 'saved'} />
+            {preview === null ? (
+              <Progress label="Working three draws out" />
+            ) : (
+              <Result preview={preview} stale={state.status.is !== 'saved'} />
+            )}
           </div>
         </div>
       </div>

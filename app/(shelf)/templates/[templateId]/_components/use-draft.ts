@@ -22,7 +22,8 @@ export type Sheet = { draft: TemplateDraft; topics: string[] };
 export interface DraftState extends Sheet {
   readonly revision: number;
   readonly status: DraftStatus;
-  readonly preview: RenderedPreview;
+  /** What the draft makes; null until the server has worked the first one out. */
+  readonly preview: RenderedPreview | null;
   /** Changes the question; it is kept at the next rest. */
   readonly change: (next: Partial<TemplateDraft>) => void;
   readonly changeTopics: (topics: string[]) => void;
@@ -34,12 +35,13 @@ export interface DraftState extends Sheet {
  */
 export function useDraft(
   templateId: string,
-  initial: Sheet & { revision: number; preview: RenderedPreview },
+  initial: Sheet & { revision: number; preview: Promise<RenderedPreview> },
 ): DraftState {
   const [sheet, setSheet] = useState<Sheet>({ draft: initial.draft, topics: initial.topics });
   const [revision, setRevision] = useState(initial.revision);
   const [status, setStatus] = useState<DraftStatus>({ is: 'saved' });
-  const [preview, setPreview] = useState(initial.preview);
+  const [preview, setPreview] = useState<RenderedPreview | null>(null);
+  const firstPreview = initial.preview;
   const latest = useRef<Sheet>(sheet);
   const sending = useRef(false);
   const known = useRef(initial.revision);
@@ -71,6 +73,11 @@ export function useDraft(
     const timer = setTimeout(() => void send(), status.is === 'failed' ? RETRY : PAUSE);
     return () => clearTimeout(timer);
   }, [sheet, status.is, send]);
+
+  useEffect(() => {
+    // A draft saved meanwhile has brought a later one.
+    void firstPreview.then((first) => setPreview((present) => present ?? first));
+  }, [firstPreview]);
 
   useEffect(() => {
     const kept = recall(key);
